@@ -15,5 +15,5 @@ public sealed class EquilibriumSolver(ThermochemicalCatalogue catalogue)
     /// <returns>An answer, all violations, or a typed failure.</returns>
     /// <exception cref="OperationCanceledException">Cancelled.</exception>
     public SolveOutcome Solve(VesselCase vesselCase, CancellationToken cancellation = default) =>
-        throw new InvalidOperationException("pending");
+        throw new InvalidOperationException($"pending {Catalogue.Digest} {vesselCase} {cancellation}");
 }
