@@ -131,6 +131,11 @@ internal sealed class ProblemBuilder(IReadOnlyDictionary<string, double> amounts
             LinkAmount = [.. links.Select(e => amounts.GetValueOrDefault(e))],
             LinkFixed = [.. links.Select((_, j) => j == oxygen && oxygenPotential is not null)],
             LinkPotential = [.. links.Select((_, j) => j == oxygen ? oxygenPotential ?? 0 : 0)],
+            SlagPhase = Array.IndexOf(phases, PhaseKind.Slag),
+            CarbonPhase = Array.IndexOf(phases, PhaseKind.Carbon),
+            CarbonIsGasified = ordered.Any(s => s is { Phase: PhaseKind.Gas, Carried: "C" }),
+            LinkHasLadder = [.. links.Select(link => ordered.Any(s => s.Phase == PhaseKind.Slag && s.Carried is not null && s.Atoms.ContainsKey(link)))],
+            Polyatomic = [.. carried.Select((_, e) => Enumerable.Range(groups[e], groups[e + 1] - groups[e]).Any(s => multiplicity[s] != 1))],
             PhaseGuess = guess,
         };
     }

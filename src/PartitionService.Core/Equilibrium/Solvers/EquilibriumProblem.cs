@@ -63,6 +63,21 @@ internal sealed class EquilibriumProblem
     /// <summary>Fixed potentials; ignored where the amount is given.</summary>
     public required double[] LinkPotential { get; init; }
 
+    /// <summary>Index of the slag, or -1.</summary>
+    public required int SlagPhase { get; init; }
+
+    /// <summary>Index of the solid carbon, or -1.</summary>
+    public required int CarbonPhase { get; init; }
+
+    /// <summary>True where carbon has gas species to go to.</summary>
+    public required bool CarbonIsGasified { get; init; }
+
+    /// <summary>True for links that compounds in the slag are made of (oxygen, chlorine in a salt): their start is a ladder of stability.</summary>
+    public required bool[] LinkHasLadder { get; init; }
+
+    /// <summary>True for elements with a species of more than one atom: their balance is a polynomial.</summary>
+    public required bool[] Polyatomic { get; init; }
+
     /// <summary>Rough amount of each phase in mol for a cold start, positive.</summary>
     public required double[] PhaseGuess { get; init; }
 

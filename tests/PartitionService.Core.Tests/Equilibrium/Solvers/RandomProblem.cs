@@ -97,6 +97,12 @@ internal static class RandomProblem
             LinkAmount = [oxygenHeld, Math.Pow(10, Between(-4, 2))],
             LinkFixed = [fixedOxygen, false],
             LinkPotential = [Between(-20, -5), 0],
+            SlagPhase = 1,
+            CarbonPhase = -1,
+            CarbonIsGasified = false,
+            LinkHasLadder = [true, false],
+            Polyatomic = [.. Enumerable.Range(0, amounts.Length).Select(e =>
+                Enumerable.Range(groups[e], groups[e + 1] - groups[e]).Any(s => multiplicity[s] != 1))],
             PhaseGuess = gas ? [1e4, inert, 100] : [1e4, inert],
         };
     }
