@@ -41,7 +41,7 @@ internal sealed class ProblemBuilder(IReadOnlyDictionary<string, double> amounts
                 []));
         }
 
-        var ordered = carried.SelectMany(e => used.Where(s => s.Carried == e)).Concat(used.Where(s => s.Carried is null)).ToArray();
+        var ordered = carried.SelectMany(e => used.Where(s => s.Carried == e).OrderBy(s => s.Atoms[e])).Concat(used.Where(s => s.Carried is null)).ToArray();
         var solutes = Enumerable.Range(0, ordered.Length)
             .Where(s => ordered[s].Phase == PhaseKind.Metal && ordered[s].Name != solvent).ToArray();
         var oxygen = Array.IndexOf(links, "O");
@@ -135,7 +135,6 @@ internal sealed class ProblemBuilder(IReadOnlyDictionary<string, double> amounts
             CarbonPhase = Array.IndexOf(phases, PhaseKind.Carbon),
             CarbonIsGasified = ordered.Any(s => s is { Phase: PhaseKind.Gas, Carried: "C" }),
             LinkHasLadder = [.. links.Select(link => ordered.Any(s => s.Phase == PhaseKind.Slag && s.Carried is not null && s.Atoms.ContainsKey(link)))],
-            Polyatomic = [.. carried.Select((_, e) => Enumerable.Range(groups[e], groups[e + 1] - groups[e]).Any(s => multiplicity[s] != 1))],
             PhaseGuess = guess,
         };
     }

@@ -44,15 +44,15 @@ internal static class RandomProblem
             if (gas)
             {
                 Add(Between(-25, solvent ? -10 : 2), 2, 1, 0, 0);
-                if (random.Next(4) == 0)
-                {
-                    Add(Between(-30, 10), 2, random.Next(2, 5), 0, 0);
-                }
-
                 if (random.Next(3) == 0)
                 {
                     Add(Between(-20, 10), 2, 1, 1, 0);
                     Add(Between(-20, 10), 2, 1, 0, 1);
+                }
+
+                if (random.Next(4) == 0)
+                {
+                    Add(Between(-30, 10), 2, random.Next(2, 5), 0, 0);
                 }
             }
 
@@ -101,8 +101,6 @@ internal static class RandomProblem
             CarbonPhase = -1,
             CarbonIsGasified = false,
             LinkHasLadder = [true, false],
-            Polyatomic = [.. Enumerable.Range(0, amounts.Length).Select(e =>
-                Enumerable.Range(groups[e], groups[e + 1] - groups[e]).Any(s => multiplicity[s] != 1))],
             PhaseGuess = gas ? [1e4, inert, 100] : [1e4, inert],
         };
     }
