@@ -67,7 +67,10 @@ public static class CatalogueLoader
 
     private static void CheckFileNames(IReadOnlyDictionary<string, string> filesByName)
     {
-        string[] expected = [.. DatumTables.Select(t => t.File), SourceTable.File, ElementTable.File, SlagFamilyTable.File, SlagComponentTable.File];
+        string[] expected =
+        [
+            .. DatumTables.Select(t => t.File), SourceTable.File, ElementTable.File, SlagFamilyTable.File, SlagComponentTable.File,
+        ];
         if (expected.FirstOrDefault(f => !filesByName.ContainsKey(f)) is { } missing)
             throw new CatalogueException(missing, 0, "the file is missing");
         if (filesByName.Keys.FirstOrDefault(f => !expected.Contains(f)) is { } unknown)

@@ -63,6 +63,7 @@ internal sealed class CsvTable
         throw new CatalogueException(
             file,
             1,
-            $"the header must be '{string.Join(',', expected)}'; missing: [{string.Join(", ", missing)}], unknown: [{string.Join(", ", unknown)}]");
+            $"the header must be '{string.Join(',', expected)}'; "
+            + $"missing: [{string.Join(", ", missing)}], unknown: [{string.Join(", ", unknown)}]");
     }
 }

@@ -53,6 +53,8 @@ internal static class PreferenceRules
     {
         if (preferred.Length > 1)
             throw preferred[1].Refuse($"slot {rows[0].Value.Slot} has {preferred.Length} preferred rows, at most one is allowed");
+        if (preferred.FirstOrDefault(r => ((OpticalBasicityDatum)r.Value).Set != "mills") is { } other)
+            throw other.Refuse("only a row of the set 'mills' may be preferred");
         var repeated = rows.GroupBy(r => ((OpticalBasicityDatum)r.Value).Set, StringComparer.Ordinal).FirstOrDefault(g => g.Skip(1).Any());
         if (repeated is not null)
             throw repeated.ElementAt(1).Refuse($"slot {rows[0].Value.Slot} has set '{repeated.Key}' twice");
@@ -77,7 +79,8 @@ internal static class PreferenceRules
             {
                 throw upper.Refuse(string.Create(
                     CultureInfo.InvariantCulture,
-                    $"slot {upper.Value.Slot}: preferred rows overlap in temperature, line {lower.Line} ends at {lower.Value.MaximumTemperatureKelvin} K"));
+                    $"slot {upper.Value.Slot}: preferred rows overlap in temperature, "
+                    + $"line {lower.Line} ends at {lower.Value.MaximumTemperatureKelvin} K"));
             }
         }
     }

@@ -21,7 +21,8 @@ public sealed class ChemicalFormulaTests
     public void Counts_the_atoms_in_order_of_appearance(string text, string expected)
     {
         var formula = ChemicalFormula.Parse(text);
-        Assert.Equal(expected, string.Join(';', formula.Atoms.Select(a => string.Create(CultureInfo.InvariantCulture, $"{a.Key}:{a.Value}"))));
+        var counts = formula.Atoms.Select(a => string.Create(CultureInfo.InvariantCulture, $"{a.Key}:{a.Value}"));
+        Assert.Equal(expected, string.Join(';', counts));
     }
 
     [Theory]
@@ -62,8 +63,11 @@ public sealed class ChemicalFormulaTests
     }
 
     [Fact]
-    public void Throwing_form_repeats_text_position_and_reason() =>
-        Assert.Equal("'Qq': position 1: 'Qq' is not an element symbol", Assert.Throws<FormatException>(() => ChemicalFormula.Parse("Qq")).Message);
+    public void Throwing_form_repeats_text_position_and_reason()
+    {
+        var refusal = Assert.Throws<FormatException>(() => ChemicalFormula.Parse("Qq"));
+        Assert.Equal("'Qq': position 1: 'Qq' is not an element symbol", refusal.Message);
+    }
 
     [Fact]
     public void There_are_118_different_symbols() => Assert.Equal(118, ElementSymbols.InOrder.Distinct().Count());
@@ -74,7 +78,8 @@ public sealed class ChemicalFormulaTests
         // Masses as round numbers on purpose: the sum is what is tested.
         Dictionary<string, Element> elements = new() { ["Al"] = Mass("Al", 27), ["O"] = Mass("O", 16), ["S"] = Mass("S", 32) };
         Assert.Equal((2 * 27) + (3 * 32) + (12 * 16), ChemicalFormula.Parse("Al2(SO4)3").MolarMass(elements));
-        Assert.Contains("Cu", Assert.Throws<KeyNotFoundException>(() => ChemicalFormula.Parse("CuO").MolarMass(elements)).Message, StringComparison.Ordinal);
+        var refusal = Assert.Throws<KeyNotFoundException>(() => ChemicalFormula.Parse("CuO").MolarMass(elements));
+        Assert.Contains("Cu", refusal.Message, StringComparison.Ordinal);
 
         static Element Mass(string symbol, double mass) => new(symbol, mass, 1, 1, 1, 1, Access.Read, ["none"], "");
     }
@@ -82,7 +87,8 @@ public sealed class ChemicalFormulaTests
     [Fact]
     public void What_is_written_from_counts_is_read_back()
     {
-        var entry = Gen.Select(Gen.Int[0, ElementSymbols.InOrder.Count - 1].Select(i => ElementSymbols.InOrder[i]), Gen.Int[1, 99_999].Select(i => i / 1000.0));
+        var symbol = Gen.Int[0, ElementSymbols.InOrder.Count - 1].Select(i => ElementSymbols.InOrder[i]);
+        var entry = Gen.Select(symbol, Gen.Int[1, 99_999].Select(i => i / 1000.0));
         entry.Array[1, 8].Where(a => a.Select(e => e.Item1).Distinct().Count() == a.Length).Sample(entries =>
         {
             var text = string.Concat(entries.Select(e => string.Create(CultureInfo.InvariantCulture, $"{e.Item1}{e.Item2}")));
