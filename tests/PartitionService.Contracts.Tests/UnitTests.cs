@@ -14,7 +14,7 @@ public sealed class UnitTests
     private static readonly string[] Dimensionless =
     [
         "activity", "activity_coefficient", "efficiency", "epsilon", "largest_balance_error", "ln_gamma", "ln_gamma0", "metal_activity",
-         "oxide_activity", "partition_ratio_slag_to_metal", "sigma", "sigma_ln_gamma", "value",
+        "oxide_activity", "partition_ratio_slag_to_metal", "sigma", "sigma_ln_gamma", "value",
     ];
 
     private static IEnumerable<FieldDescriptor> Numbers =>

@@ -30,7 +30,7 @@ public sealed class ReferenceStateConversionTests
     {
         const double temperature = 1873;
         const double energy = 33470 - (39.37 * temperature);
-        var gamma0 = Math.Exp(energy / (ReferenceStateConversion.GasConstantJoulePerMolKelvin * temperature)) * 100 * Copper / Iron;
+        var gamma0 = Math.Exp(energy / (PhysicalConstants.GasConstant * temperature)) * 100 * Copper / Iron;
         Assert.InRange(gamma0, 8.5, 8.7);
     }
 
