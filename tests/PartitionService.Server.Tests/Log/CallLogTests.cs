@@ -115,5 +115,16 @@ public sealed class CallLogTests
         await server.DisposeAsync();
     }
 
+    /// <summary>Once the events of a server went to whichever server of the process was built last.</summary>
+    [Fact]
+    public async Task Servers_of_one_process_keep_their_logs_apart()
+    {
+        await using var first = await RunningServer.StartAsync();
+        await using var second = await RunningServer.StartAsync();
+        await first.Catalogue.ListSolventsAsync(new ListSolventsRequest(), Headers("first"));
+        await first.CallEventAsync("first");
+        Assert.DoesNotContain(second.Logs, e => LogText.Of(e, "RequestId") == "first");
+    }
+
     private static Metadata Headers(string id) => new() { { "x-request-id", id } };
 }

@@ -61,7 +61,7 @@ public sealed class RunningServer : IAsyncDisposable
     /// <summary>The event of a call, which is written a moment after the caller has the answer.</summary>
     public async Task<LogEvent> CallEventAsync(string requestId)
     {
-        for (var attempt = 0; attempt < 200; attempt++)
+        for (var attempt = 0; attempt < 800; attempt++)
         {
             var found = Logs.SingleOrDefault(e => LogText.Id(e) is 2001 or 2002 && LogText.Of(e, "RequestId") == requestId);
             if (found is not null)
@@ -69,7 +69,7 @@ public sealed class RunningServer : IAsyncDisposable
             await Task.Delay(25);
         }
 
-        throw new InvalidOperationException($"no event for {requestId}");
+        throw new InvalidOperationException($"no event for {requestId} among: {string.Concat(Logs.Select(LogText.Json))}");
     }
 
     public async ValueTask DisposeAsync()
