@@ -48,17 +48,7 @@ public sealed class PartitionServerTests
     {
         await using var server = await RunningServer.StartAsync();
         using var client = new HttpClient { DefaultRequestVersion = HttpVersion.Version11 };
-        var failed = false;
-        try
-        {
-            using var response = await client.GetAsync(server.Address);
-            failed = !response.IsSuccessStatusCode;
-        }
-        catch (HttpRequestException)
-        {
-            failed = true;
-        }
-
-        Assert.True(failed);
+        var spoken = await Record.ExceptionAsync(async () => (await client.GetAsync(server.Address)).EnsureSuccessStatusCode().Dispose());
+        Assert.IsType<HttpRequestException>(spoken);
     }
 }

@@ -18,11 +18,13 @@ internal static class LogSetup
 
     private static void Configure(LoggerConfiguration logger, IServiceProvider provider, ServerOptions options)
     {
+        var level = LevelOf(options.LogLevel);
+        // Below warning the framework repeats error texts and addresses per call, which may quote a request.
+        var frameworkLevel = level > LogEventLevel.Warning ? level : LogEventLevel.Warning;
         logger
-            .MinimumLevel.Is(LevelOf(options.LogLevel))
-            // Below warning the framework repeats error texts and addresses per call, which may quote a request.
-            .MinimumLevel.Override("Microsoft", LogEventLevel.Warning)
-            .MinimumLevel.Override("Grpc", LogEventLevel.Warning)
+            .MinimumLevel.Is(level)
+            .MinimumLevel.Override("Microsoft", frameworkLevel)
+            .MinimumLevel.Override("Grpc", frameworkLevel)
             .Enrich.FromLogContext();
         if (options.LogLevel == LogLevel.None)
             logger.Filter.ByExcluding(_ => true);

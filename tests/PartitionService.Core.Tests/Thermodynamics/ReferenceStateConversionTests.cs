@@ -34,11 +34,11 @@ public sealed class ReferenceStateConversionTests
         Assert.InRange(gamma0, 8.5, 8.7);
     }
 
-    /// <summary>By hand: 1 mass % Cu in Fe holds 1/63.546 = 0.0157366 mol Cu and 99/55.845 = 1.772764 mol Fe per 100 g.</summary>
+    /// <summary>By hand: 1 mass % Cu in Fe holds 1/63.546 = 0.0157366317 mol Cu and 99/55.845 = 1.77276390 mol Fe per 100 g.</summary>
     [Fact]
     public void One_mass_percent_is_converted_exactly()
     {
-        Assert.Equal(0.0157366 / (0.0157366 + 1.772764), ReferenceStateConversion.MoleFractionFromMassPercent(1, Copper, Iron), 8);
+        Assert.Equal(0.0157366317 / (0.0157366317 + 1.77276390), ReferenceStateConversion.MoleFractionFromMassPercent(1, Copper, Iron), 8);
     }
 
     [Theory]
