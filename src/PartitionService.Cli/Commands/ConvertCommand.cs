@@ -1,0 +1,78 @@
+using System.CommandLine;
+using PartitionService.Cli.Hosting;
+using PartitionService.Cli.Output;
+using PartitionService.Contracts.V1;
+
+namespace PartitionService.Cli.Commands;
+
+/// <summary>Converts the activity of a dilute solute between reference states.</summary>
+internal static class ConvertCommand
+{
+    private static readonly Dictionary<string, ReferenceState> States = new(StringComparer.Ordinal)
+    {
+        ["raoultian"] = ReferenceState.Raoultian,
+        ["henrian-mole-fraction"] = ReferenceState.HenrianMoleFraction,
+        ["henrian-mass-percent"] = ReferenceState.HenrianOneMassPercent,
+    };
+
+    /// <summary>Makes the command.</summary>
+    /// <param name="terminal">Where it writes.</param>
+    /// <returns>The command.</returns>
+    public static Command Create(Terminal terminal)
+    {
+        var solvent = new Option<string>("--solvent") { Description = "Element symbol of the liquid metal.", Required = true, HelpName = "ELEMENT" };
+        var solute = new Option<string>("--solute") { Description = "Element symbol of the dissolved element.", Required = true, HelpName = "ELEMENT" };
+        var temperature = RequiredNumber("--temperature", "Temperature in kelvin, from 500 to 2500.", "KELVIN");
+        var activity = RequiredNumber("--activity", "Activity in the reference state --from, above 0.", "NUMBER");
+        var from = State("--from", "Reference state of the activity.");
+        var to = State("--to", "Reference state to convert to.");
+        var lnGamma0 = new Option<double?>("--ln-gamma0")
+        {
+            Description = "ln gamma0 of the solute (natural logarithm, mole fraction, Raoultian). Unset: the catalogue's.",
+            HelpName = "NUMBER",
+            CustomParser = result => CommonOptions.Number(result, _ => true, ""),
+        };
+        var (address, timeout, format, output) = (CommonOptions.Address(), CommonOptions.Timeout(), CommonOptions.Format(), CommonOptions.Output());
+        var command = new Command("convert", "Converts the activity of a dilute solute between reference states.")
+        {
+            solvent, solute, temperature, activity, from, to, lnGamma0, address, timeout, format, output,
+        };
+        command.SetAction(async (parsed, cancellation) =>
+        {
+            var request = new ConvertActivityCoefficientRequest
+            {
+                Solvent = parsed.GetRequiredValue(solvent),
+                Solute = parsed.GetRequiredValue(solute),
+                TemperatureKelvin = parsed.GetRequiredValue(temperature),
+                Activity = parsed.GetRequiredValue(activity),
+                From = States[parsed.GetRequiredValue(from)],
+                To = States[parsed.GetRequiredValue(to)],
+            };
+            if (parsed.GetValue(lnGamma0) is { } given)
+                request.LnGamma0 = given;
+            var connection = await ServiceConnection
+                .OpenAsync(parsed.GetValue(address), TimeSpan.FromSeconds(parsed.GetValue(timeout)), cancellation).ConfigureAwait(false);
+            await using var _ = connection.ConfigureAwait(false);
+            var response = await connection.Client.ConvertActivityCoefficientAsync(request, cancellation).ConfigureAwait(false);
+            var text = ListingText.Render(ConversionListing.Of(request, response), parsed.GetRequiredValue(format), terminal, parsed.GetValue(output));
+            await OutputFile.WriteAsync(text, parsed.GetValue(output), terminal, cancellation).ConfigureAwait(false);
+            return ExitCode.Success;
+        });
+        return command;
+    }
+
+    private static Option<double> RequiredNumber(string name, string description, string helpName) => new(name)
+    {
+        Description = description,
+        HelpName = helpName,
+        Required = true,
+        CustomParser = result => CommonOptions.Number(result, _ => true, ""),
+    };
+
+    private static Option<string> State(string name, string description)
+    {
+        var option = new Option<string>(name) { Description = description, Required = true };
+        option.AcceptOnlyFromAmong([.. States.Keys]);
+        return option;
+    }
+}
