@@ -7,7 +7,7 @@ namespace PartitionService.Core.Catalogue;
 /// <param name="MaximumTemperatureKelvin">Upper end of the usual temperature range in kelvin.</param>
 /// <param name="MonoCationMolPer100Gram">Mol of mono-cations in 100 g of typical slag.</param>
 /// <param name="Components">Usual composition, mass % of whole oxides or salts.</param>
-/// <param name="TypicalEntrainedMetalMassPercent">Metal droplets in settled slag, mass % of slag; null where the catalogue has none.</param>
+/// <param name="TypicalEntrainedMetalMassPercent">Metal droplets in settled slag, mass % of slag; null where there is none.</param>
 /// <param name="EntrainmentSlot">Slot of the entrainment row that the typical value comes from; empty where there is none.</param>
 /// <param name="CapacityFormulas">Ids of the capacity formulas that apply to the family (sulfur, phosphorus).</param>
 /// <param name="Access">How the window was obtained.</param>

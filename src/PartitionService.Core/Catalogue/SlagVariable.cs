@@ -12,6 +12,8 @@ public enum SlagVariable
     /// <summary>Fe/SiO2, mass ratio of total iron to silica.</summary>
     IronToSiO2MassRatio,
 
-    /// <summary>22 N(CaO) + 15 N(MgO) + 13 N(MnO) + 12 N(FeO) - 2 N(SiO2), mole fractions of whole oxides (Turkdogan and Pearson 1953).</summary>
+    /// <summary>
+    /// 22 N(CaO) + 15 N(MgO) + 13 N(MnO) + 12 N(FeO) - 2 N(SiO2), mole fractions of whole oxides (Turkdogan and Pearson 1953).
+    /// </summary>
     PhosphorusBasicitySum,
 }

@@ -1,0 +1,56 @@
+using System.Runtime.CompilerServices;
+using PartitionService.Core.Catalogue;
+
+namespace PartitionService.Core.Equilibrium.Assembly;
+
+/// <summary>Oxides and chlorides by slag family and element, found once per catalogue.</summary>
+internal sealed class SlagIndex
+{
+    private static readonly ConditionalWeakTable<ThermochemicalCatalogue, SlagIndex> Indexes = [];
+
+    private readonly Dictionary<(string Family, string Element), List<string>> oxides = [];
+    private readonly Dictionary<string, string> elementOfOxide = new(StringComparer.Ordinal);
+
+    private SlagIndex(ThermochemicalCatalogue catalogue)
+    {
+        foreach (var row in catalogue.Data.OfType<SlagActivityDatum>().Where(row => row.Preferred))
+        {
+            var key = (row.Family, row.Element);
+            if (!oxides.TryGetValue(key, out var names))
+            {
+                oxides[key] = names = [];
+            }
+
+            if (!names.Contains(row.Oxide))
+            {
+                names.Add(row.Oxide);
+            }
+        }
+
+        foreach (var row in catalogue.Data.OfType<OxidationDatum>())
+        {
+            elementOfOxide.TryAdd(row.Oxide, row.Element);
+        }
+    }
+
+    /// <summary>The index of a catalogue.</summary>
+    public static SlagIndex For(ThermochemicalCatalogue catalogue) => Indexes.GetValue(catalogue, key => new SlagIndex(key));
+
+    /// <summary>Oxides and chlorides of an element in a family, those that only an override names included.</summary>
+    public IEnumerable<string> Oxides(string family, string element, DatumLedger ledger)
+    {
+        var known = oxides.GetValueOrDefault((family, element), []);
+        foreach (var name in known)
+        {
+            yield return name;
+        }
+
+        foreach (var name in ledger.OverriddenOxides(family))
+        {
+            if (!known.Contains(name) && elementOfOxide.GetValueOrDefault(name) == element)
+            {
+                yield return name;
+            }
+        }
+    }
+}

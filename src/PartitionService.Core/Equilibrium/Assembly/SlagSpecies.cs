@@ -1,0 +1,213 @@
+using PartitionService.Core.Catalogue;
+using PartitionService.Core.Thermodynamics;
+
+namespace PartitionService.Core.Equilibrium.Assembly;
+
+/// <summary>Species of the slag: mononuclear oxides and chlorides, and sulfide by the sulfide capacity.</summary>
+/// <param name="family">Slag family.</param>
+/// <param name="composition">Composition that activity coefficients depend on.</param>
+/// <param name="solvent">Solvent, whose rows decide the state of the metal in the oxidation rows.</param>
+/// <param name="temperatureKelvin">Temperature in kelvin.</param>
+/// <param name="catalogue">The catalogue.</param>
+/// <param name="ledger">Rows and overrides.</param>
+internal sealed class SlagSpecies(
+    SlagFamily family,
+    SlagComposition composition,
+    string solvent,
+    double temperatureKelvin,
+    ThermochemicalCatalogue catalogue,
+    DatumLedger ledger)
+{
+    private readonly double thermal = PhysicalConstants.GasConstant * temperatureKelvin;
+
+    /// <summary>Composition terms that were left out or used outside the family's window.</summary>
+    public List<CompositionTerm> CompositionTerms { get; } = [];
+
+    /// <summary>Optical basicity of the slag where sulfide was computed; null otherwise.</summary>
+    public double? OpticalBasicity { get; private set; }
+
+    /// <summary>A composition term of one activity coefficient.</summary>
+    /// <param name="Row">The row.</param>
+    /// <param name="Value">Value of the variable; null where it is not known and the term was left out.</param>
+    public sealed record CompositionTerm(SlagActivityDatum Row, double? Value);
+
+    /// <summary>Species of one element; empty where the family has none.</summary>
+    public IEnumerable<SpeciesRecord> Create(Element element)
+    {
+        foreach (var oxide in SlagIndex.For(catalogue).Oxides(family.Name, element.Symbol, ledger))
+        {
+            var slot = $"slag/{family.Name}/{oxide}";
+            var row = ledger.Select<SlagActivityDatum>(slot);
+            var species = row is { OxideState: StandardState.ProductOnly } ? Product(element, slot, row)
+                : row is { ChlorinePerMetal: > 0 } ? Chloride(element, slot, row)
+                : Oxide(element, slot, oxide, row);
+            if (species is not null)
+            {
+                yield return species;
+            }
+        }
+    }
+
+    /// <summary>Sulfide, ln x = ln C_S - ln(32.06 n) + 1/2 ln pS2 - 1/2 ln pO2 with n mol of cations in 100 g; null where no formula applies.</summary>
+    /// <remarks>C_S = (mass % S)(pO2/pS2)^(1/2), Sosinsky and Sommerville 1986. A sulfide ion replaces an oxide ion.</remarks>
+    public SpeciesRecord? Sulfide()
+    {
+        if (!family.CapacityFormulas.Contains("sosinsky-cs")
+            || composition.OpticalBasicity(catalogue) is not { } basicity
+            || ledger.Select<CapacityDatum>(Thermodynamics.SulfideCapacity.Slot) is not { } row)
+        {
+            return null;
+        }
+
+        OpticalBasicity = basicity;
+        var log10 = Thermodynamics.SulfideCapacity.Log10(basicity, temperatureKelvin);
+        ledger.Take(row.Slot, row, "log10 of the sulfide capacity", log10, "mass %", row.SigmaLog10);
+        var sulfurMass = catalogue.Elements["S"].AtomicMassGramPerMol;
+        return new SpeciesRecord(
+            "S",
+            PhaseKind.Slag,
+            null,
+            new Dictionary<string, double>(StringComparer.Ordinal) { ["S"] = 1, ["O"] = -1 },
+            (log10 * Math.Log(10)) - Math.Log(sulfurMass * family.MonoCationMolPer100Gram),
+            null,
+            "",
+            [row.Slot]);
+    }
+
+    private SpeciesRecord? Product(Element element, string slot, SlagActivityDatum row)
+    {
+        if (StateConversion.LnReferenceOverState(element, row.MetalState, temperatureKelvin, catalogue) is not { } conversion)
+        {
+            return null;
+        }
+
+        var value = ledger.Override(slot) ?? row.LnGamma(temperatureKelvin);
+        ledger.Take(slot, row, $"ln(K/gamma) of {row.Oxide} in {family.Name} slag", value, "1", row.SigmaLnGamma);
+        return Species(row.Oxide, element.Symbol, row.OxygenPerMetal, 0, value - conversion, null, "", [slot]);
+    }
+
+    private SpeciesRecord? Chloride(Element element, string slot, SlagActivityDatum row)
+    {
+        var chlorideSlot = $"chloride/{row.Oxide}";
+        if (ledger.Select<ChlorideDatum>(chlorideSlot, c => c.ChlorideState == row.OxideState) is not { } formation)
+        {
+            return null;
+        }
+
+        var energy = ledger.Override(chlorideSlot) ?? formation.GibbsEnergy(temperatureKelvin);
+        ledger.Take(
+            chlorideSlot, formation, $"Gibbs energy of formation of {row.Oxide}(l)", energy, "J/mol", formation.SigmaJoulePerMol);
+        var lnGamma = LnGamma(slot, row);
+        return Species(
+            row.Oxide,
+            element.Symbol,
+            0,
+            row.ChlorinePerMetal,
+            (-energy / thermal) - lnGamma,
+            lnGamma,
+            "pure liquid chloride",
+            [slot, chlorideSlot]);
+    }
+
+    private SpeciesRecord? Oxide(Element element, string slot, string oxide, SlagActivityDatum? row)
+    {
+        var oxidationSlot = $"oxidation/{oxide}";
+        var state = row?.OxideState
+            ?? ledger.Select<OxidationDatum>(oxidationSlot, o => o.OxideState == StandardState.Liquid)?.OxideState
+            ?? StandardState.Solid;
+        if (Oxidation(element, oxidationSlot, state) is not { } oxidation
+            || StateConversion.LnReferenceOverState(element, oxidation.MetalState, temperatureKelvin, catalogue) is not { } conversion)
+        {
+            return null;
+        }
+
+        // An override is stated from the liquid metal, the reference itself.
+        var given = ledger.Override(oxidationSlot);
+        var energy = given ?? oxidation.GibbsEnergy(temperatureKelvin);
+        ledger.Take(
+            oxidationSlot,
+            oxidation,
+            $"Gibbs energy of oxidation to {oxide}({Words(state)}) from {Words(oxidation.MetalState)} {element.Symbol}",
+            energy,
+            "J/mol",
+            oxidation.SigmaJoulePerMol);
+        var lnGamma = row is null ? OverrideOnly(slot, oxide) : LnGamma(slot, row);
+        var lnK = (-energy / thermal) - (given is null ? conversion : 0) - lnGamma;
+        return Species(
+            oxide, element.Symbol, oxidation.OxygenPerMetal, 0, lnK, lnGamma, $"pure {Words(state)} oxide", [slot, oxidationSlot]);
+    }
+
+    /// <summary>
+    /// The oxidation row in the state that the solute's own row has, so that errors of the metal's state cancel in K gamma0; liquid
+    /// next, then any other.
+    /// </summary>
+    private OxidationDatum? Oxidation(Element element, string slot, StandardState oxideState)
+    {
+        var soluteState = ledger.Select<InfiniteDilutionDatum>(MetalSpecies.Slot(solvent, element.Symbol))?.SoluteState
+            ?? StandardState.Liquid;
+        return ledger.Select<OxidationDatum>(slot, o => o.OxideState == oxideState && o.MetalState == soluteState)
+            ?? ledger.Select<OxidationDatum>(slot, o => o.OxideState == oxideState && o.MetalState == StandardState.Liquid)
+            ?? ledger.Select<OxidationDatum>(slot, o => o.OxideState == oxideState);
+    }
+
+    private double OverrideOnly(string slot, string oxide)
+    {
+        var value = ledger.Override(slot) ?? 0;
+        ledger.Take(slot, null, $"ln gamma of {oxide} in {family.Name} slag", value, "1", null);
+        return value;
+    }
+
+    private double LnGamma(string slot, SlagActivityDatum row)
+    {
+        var quantity = $"ln gamma of {row.Oxide} in {family.Name} slag";
+        if (ledger.Override(slot) is { } given)
+        {
+            ledger.Take(slot, row, quantity, given, "1", null);
+            return given;
+        }
+
+        var value = row.LnGamma(temperatureKelvin);
+        if (row.Variable is { } variable)
+        {
+            var known = composition.IsTypical ? null : composition.Variable(variable, catalogue.Elements);
+            value += known is { } number ? row.Slope * (number - row.VariableReference) : 0;
+            CompositionTerms.Add(new CompositionTerm(row, known));
+        }
+
+        ledger.Take(slot, row, quantity, value, "1", row.SigmaLnGamma);
+        return value;
+    }
+
+    private static SpeciesRecord Species(
+        string name,
+        string element,
+        double oxygen,
+        double chlorine,
+        double lnK,
+        double? lnGamma,
+        string standardState,
+        string[] slots)
+    {
+        var atoms = new Dictionary<string, double>(StringComparer.Ordinal) { [element] = 1 };
+        if (oxygen > 0)
+        {
+            atoms["O"] = oxygen;
+        }
+
+        if (chlorine > 0)
+        {
+            atoms["Cl"] = chlorine;
+        }
+
+        return new SpeciesRecord(name, PhaseKind.Slag, element, atoms, lnK, lnGamma, standardState, slots);
+    }
+
+    private static string Words(StandardState state) => state switch
+    {
+        StandardState.Liquid => "liquid",
+        StandardState.Solid => "solid",
+        StandardState.MonatomicGas => "gaseous",
+        StandardState.HalfDiatomicGas => "diatomic gaseous",
+        _ => state.ToString(),
+    };
+}

@@ -1,0 +1,224 @@
+namespace PartitionService.Core.Equilibrium.Solvers;
+
+/// <summary>Newton's method on the reduced saddle: the fast method, from a cold or a warm start.</summary>
+/// <remarks>
+/// Steps are limited to 2.5 in each potential and to a factor of four in each amount. A phase that keeps shrinking is taken away;
+/// it comes back when the sum of its mole fractions exceeds 1 at the solution without it, so phases appear and vanish without a jump.
+/// </remarks>
+internal static class ReducedNewton
+{
+    private const int Stride = SolverWorkspace.MaximumBorder;
+    private const double LargestPotentialStep = 2.5;
+    private const double LargestAmountFactor = 4;
+
+    /// <summary>Iterates from the state of <paramref name="work"/>.</summary>
+    /// <param name="problem">The problem.</param>
+    /// <param name="work">State and buffers; references must be set.</param>
+    /// <param name="iterations">Receives the number of steps, added to its value.</param>
+    /// <param name="cancellation">Stops the iteration.</param>
+    /// <returns>True where every stopping rule is met.</returns>
+    public static bool TrySolve(EquilibriumProblem problem, SolverWorkspace work, ref int iterations, CancellationToken cancellation)
+    {
+        Span<bool> required = stackalloc bool[EquilibriumProblem.MaximumPhases];
+        FindRequired(problem, required);
+        Span<int> shrinking = stackalloc int[EquilibriumProblem.MaximumPhases];
+        Span<int> formed = stackalloc int[EquilibriumProblem.MaximumPhases];
+        shrinking.Clear();
+        formed.Clear();
+        var lastStep = double.PositiveInfinity;
+        for (var step = 0; step < Convergence.NewtonLimit; step++)
+        {
+            cancellation.ThrowIfCancellationRequested();
+            if (!ReducedSystem.Evaluate(problem, work))
+            {
+                ReducedSystem.SetReferences(problem, work);
+                if (!ReducedSystem.Evaluate(problem, work))
+                {
+                    return false;
+                }
+            }
+
+            if (Residual(problem, work) <= Convergence.Tolerance || lastStep <= Convergence.StepTolerance)
+            {
+                if (!FormMissingPhase(problem, work, formed))
+                {
+                    return Residual(problem, work) <= 1e3 * Convergence.Tolerance;
+                }
+
+                lastStep = double.PositiveInfinity;
+                shrinking.Clear();
+                continue;
+            }
+
+            iterations++;
+            var size = Assemble(problem, work);
+            if (size == 0 || !BorderSystem.Solve(work.Matrix, work.Step, size, Stride))
+            {
+                return false;
+            }
+
+            lastStep = Move(problem, work, size, required, shrinking);
+            if (!double.IsFinite(lastStep))
+            {
+                return false;
+            }
+        }
+
+        return false;
+    }
+
+    /// <summary>Largest relative residual over unknown links and present phases.</summary>
+    public static double Residual(EquilibriumProblem problem, SolverWorkspace work)
+    {
+        var residual = 0.0;
+        for (var j = 0; j < problem.LinkCount; j++)
+        {
+            if (!problem.LinkFixed[j])
+            {
+                residual = Math.Max(residual, Math.Abs(work.Gradient[j]) / work.LinkGross[j]);
+            }
+        }
+
+        for (var phase = 0; phase < problem.PhaseCount; phase++)
+        {
+            if (work.Present[phase])
+            {
+                residual = Math.Max(residual, Math.Abs(work.Gradient[problem.LinkCount + phase]));
+            }
+        }
+
+        return residual;
+    }
+
+    /// <summary>Phases that alone can hold some component: they cannot vanish.</summary>
+    private static void FindRequired(EquilibriumProblem problem, Span<bool> required)
+    {
+        required.Clear();
+        for (var element = 0; element < problem.ElementCount; element++)
+        {
+            var first = problem.Phase[problem.GroupStart[element]];
+            var single = true;
+            for (var s = problem.GroupStart[element] + 1; s < problem.GroupStart[element + 1]; s++)
+            {
+                single &= problem.Phase[s] == first;
+            }
+
+            required[first] |= single;
+        }
+
+        for (var j = 0; j < problem.LinkCount; j++)
+        {
+            var only = -1;
+            for (var s = 0; s < problem.SpeciesCount && !problem.LinkFixed[j]; s++)
+            {
+                if (problem.LinkAtoms[j][s] > 0)
+                {
+                    only = only < 0 || only == problem.Phase[s] ? problem.Phase[s] : EquilibriumProblem.MaximumPhases;
+                }
+            }
+
+            if (only >= 0 && only < EquilibriumProblem.MaximumPhases)
+            {
+                required[only] = true;
+            }
+        }
+    }
+
+    private static bool FormMissingPhase(EquilibriumProblem problem, SolverWorkspace work, Span<int> formed)
+    {
+        var total = 0.0;
+        for (var phase = 0; phase < problem.PhaseCount; phase++)
+        {
+            total += work.PhaseAmount[phase];
+        }
+
+        var any = false;
+        for (var phase = 0; phase < problem.PhaseCount; phase++)
+        {
+            if (!work.Present[phase] && work.PhaseSum[phase] > 1 + Convergence.FormationTolerance)
+            {
+                work.Present[phase] = true;
+
+                // A phase that was taken away too soon holds very little: seed it with less each time.
+                work.PhaseAmount[phase] = Math.Min(1e-4 * total, 0.1 * problem.PhaseGuess[phase]) * Math.Pow(1e-3, formed[phase]++);
+                any = true;
+            }
+        }
+
+        return any;
+    }
+
+    private static int Assemble(EquilibriumProblem problem, SolverWorkspace work)
+    {
+        var size = 0;
+        for (var j = 0; j < problem.LinkCount; j++)
+        {
+            if (!problem.LinkFixed[j])
+            {
+                work.Unknown[size++] = j;
+            }
+        }
+
+        for (var phase = 0; phase < problem.PhaseCount; phase++)
+        {
+            if (work.Present[phase])
+            {
+                work.Unknown[size++] = problem.LinkCount + phase;
+            }
+        }
+
+        for (var row = 0; row < size; row++)
+        {
+            var border = work.Unknown[row];
+            for (var column = 0; column < size; column++)
+            {
+                work.Matrix[(row * Stride) + column] = work.Hessian[(border * Stride) + work.Unknown[column]];
+            }
+
+            work.Step[row] = -work.Gradient[border];
+        }
+
+        return size;
+    }
+
+    private static double Move(
+        EquilibriumProblem problem, SolverWorkspace work, int size, ReadOnlySpan<bool> required, Span<int> shrinking)
+    {
+        var scale = 1.0;
+        for (var row = 0; row < size; row++)
+        {
+            if (work.Unknown[row] < problem.LinkCount)
+            {
+                scale = Math.Min(scale, LargestPotentialStep / Math.Abs(work.Step[row]));
+            }
+        }
+
+        var largest = 0.0;
+        for (var row = 0; row < size; row++)
+        {
+            var border = work.Unknown[row];
+            var move = scale * work.Step[row];
+            if (border < problem.LinkCount)
+            {
+                work.Link[border] += move;
+                largest = Math.Max(largest, Math.Abs(move) / Math.Max(1, Math.Abs(work.Link[border])));
+                continue;
+            }
+
+            var phase = border - problem.LinkCount;
+            var amount = work.PhaseAmount[phase];
+            var next = Math.Clamp(amount + move, amount / LargestAmountFactor, amount * LargestAmountFactor);
+            largest = Math.Max(largest, Math.Abs(next - amount) / amount);
+            shrinking[phase] = amount + work.Step[row] < 0 && work.PhaseSum[phase] < 1 ? shrinking[phase] + 1 : 0;
+            if (shrinking[phase] >= 3 && !required[phase])
+            {
+                work.Present[phase] = false;
+                next = 0;
+            }
+
+            work.PhaseAmount[phase] = next;
+        }
+
+        return largest;
+    }
+}
