@@ -194,9 +194,9 @@ public sealed class PartitionClient : IDisposable
             using var call = start(options);
             return await call.ResponseAsync.ConfigureAwait(false);
         }
-        catch (RpcException failure) when (failure.StatusCode == StatusCode.Cancelled && cancellation.IsCancellationRequested)
+        catch (RpcException failure) when (cancellation.IsCancellationRequested)
         {
-            // The caller's own wish is not an error of the service.
+            // The caller's own wish is not an error of the service, whichever status the race between both ended with.
             throw new OperationCanceledException("The call was cancelled by the caller.", failure, cancellation);
         }
         catch (RpcException failure)
