@@ -45,8 +45,7 @@ internal sealed class CaseTreeReader
 
     private CaseNode ReadNode(int level)
     {
-        if (!parser.MoveNext() || parser.Current is not { } current)
-            throw new CaseTreeException(1, 1, "The file ends too early.");
+        var current = parser.Consume<ParsingEvent>();
         var line = (int)current.Start.Line;
         var column = (int)current.Start.Column;
         if (current is AnchorAlias)

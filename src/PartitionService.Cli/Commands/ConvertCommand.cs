@@ -12,7 +12,7 @@ internal static class ConvertCommand
     {
         ["raoultian"] = ReferenceState.Raoultian,
         ["henrian-mole-fraction"] = ReferenceState.HenrianMoleFraction,
-        ["henrian-mass-percent"] = ReferenceState.HenrianOneMassPercent,
+        ["henrian-one-mass-percent"] = ReferenceState.HenrianOneMassPercent,
     };
 
     /// <summary>Makes the command.</summary>

@@ -18,7 +18,7 @@ internal static class SolveCommand
         var file = new Argument<string>("FILE") { Description = "Case file, YAML. The command \"starter\" writes one with explanations." };
         var (address, timeout, format, output) = (CommonOptions.Address(), CommonOptions.Timeout(), CommonOptions.Format(), CommonOptions.Output());
         var data = new Option<bool>("--data") { Description = "With a table: list every datum that entered the answer, with its sigma and source." };
-        var command = new Command("solve", $"Solves the vessel of a case file.{Environment.NewLine}{Environment.NewLine}{ExitCode.Help}")
+        var command = new Command("solve", "Solves the vessel of a case file. The exit status is explained by: partition --help")
         {
             file, address, timeout, format, output, data,
         };
