@@ -1,4 +1,7 @@
 using PartitionService.Core.Catalogue;
+using PartitionService.Core.Equilibrium.Assembly;
+using PartitionService.Core.Equilibrium.Reporting;
+using PartitionService.Core.Equilibrium.Solvers;
 
 namespace PartitionService.Core.Equilibrium;
 
@@ -6,6 +9,9 @@ namespace PartitionService.Core.Equilibrium;
 /// <param name="catalogue">The catalogue.</param>
 public sealed class EquilibriumSolver(ThermochemicalCatalogue catalogue)
 {
+    [ThreadStatic]
+    private static SolverWorkspace? threadWorkspace;
+
     /// <summary>The catalogue that cases are solved against.</summary>
     public ThermochemicalCatalogue Catalogue { get; } = catalogue;
 
@@ -14,6 +20,33 @@ public sealed class EquilibriumSolver(ThermochemicalCatalogue catalogue)
     /// <param name="cancellation">Stops the iteration.</param>
     /// <returns>An answer, all violations, or a typed failure.</returns>
     /// <exception cref="OperationCanceledException">Cancelled.</exception>
-    public SolveOutcome Solve(VesselCase vesselCase, CancellationToken cancellation = default) =>
-        throw new InvalidOperationException($"pending {Catalogue.Digest} {vesselCase} {cancellation}");
+    public SolveOutcome Solve(VesselCase vesselCase, CancellationToken cancellation = default)
+    {
+        ArgumentNullException.ThrowIfNull(vesselCase);
+        cancellation.ThrowIfCancellationRequested();
+        var violations = CaseValidation.Validate(vesselCase, Catalogue);
+        if (violations.Count > 0)
+        {
+            return new SolveOutcome.Invalid(violations);
+        }
+
+        var assembly = new VesselAssembler(vesselCase, Catalogue).Assemble(out var failure);
+        if (assembly is null)
+        {
+            return failure!;
+        }
+
+        if (FailureRules.Before(assembly) is { } impossible)
+        {
+            return impossible;
+        }
+
+        var work = threadWorkspace ??= new SolverWorkspace();
+        double? dissolved = vesselCase.Oxygen is OxygenStatement.Dissolved statement ? 1e-6 * statement.MassPpm : null;
+        var state = ActivityIteration.Solve(
+            assembly.Assembled, dissolved, Catalogue.Elements, work, cancellation);
+        return FailureRules.After(assembly, state) is { } failed
+            ? failed
+            : new SolveOutcome.Solved(new AnswerBuilder(vesselCase, Catalogue, assembly, state).Build());
+    }
 }

@@ -11,6 +11,8 @@ internal sealed class SlagIndex
     private readonly Dictionary<(string Family, string Element), List<string>> oxides = [];
     private readonly Dictionary<string, string> elementOfOxide = new(StringComparer.Ordinal);
 
+    private readonly Dictionary<string, double> usualOxygen = new(StringComparer.Ordinal) { ["C"] = 2, ["N"] = 2.5 };
+
     private SlagIndex(ThermochemicalCatalogue catalogue)
     {
         foreach (var row in catalogue.Data.OfType<SlagActivityDatum>().Where(row => row.Preferred))
@@ -30,11 +32,15 @@ internal sealed class SlagIndex
         foreach (var row in catalogue.Data.OfType<OxidationDatum>())
         {
             elementOfOxide.TryAdd(row.Oxide, row.Element);
+            usualOxygen[row.Element] = Math.Min(usualOxygen.GetValueOrDefault(row.Element, double.PositiveInfinity), row.OxygenPerMetal);
         }
     }
 
     /// <summary>The index of a catalogue.</summary>
     public static SlagIndex For(ThermochemicalCatalogue catalogue) => Indexes.GetValue(catalogue, key => new SlagIndex(key));
+
+    /// <summary>Oxygen atoms per atom in the lowest oxide of the catalogue (carbonate, nitrate for C, N); 1 where it has none.</summary>
+    public double UsualOxygen(string element) => usualOxygen.GetValueOrDefault(element, 1);
 
     /// <summary>Oxides and chlorides of an element in a family, those that only an override names included.</summary>
     public IEnumerable<string> Oxides(string family, string element, DatumLedger ledger)

@@ -1,0 +1,71 @@
+using PartitionService.Core.Equilibrium.Solvers;
+
+namespace PartitionService.Core.Equilibrium.Assembly;
+
+/// <summary>Says which condition of a valid case cannot hold.</summary>
+internal static class FailureRules
+{
+    /// <summary>Conditions that can be seen before the iteration.</summary>
+    public static SolveOutcome.Failed? Before(VesselAssembly assembly)
+    {
+        var assembled = assembly.Assembled;
+        if (assembly.FixedOxygen is not null || assembled.OxygenLink < 0 || Array.IndexOf(assembled.Phases, PhaseKind.Gas) >= 0)
+        {
+            return null;
+        }
+
+        // Without a gas only oxides hold oxygen; what the metal dissolves beyond them would be no metal any more.
+        var capacity = 0.0;
+        for (var element = 0; element < assembled.Carried.Length; element++)
+        {
+            var most = assembled.Species
+                .Where(s => s.Carried == assembled.Carried[element])
+                .Select(s => s.Atoms.GetValueOrDefault("O") / Math.Max(1, s.Atoms[s.Carried!]))
+                .DefaultIfEmpty(0).Max();
+            capacity += most * assembled.Problem.ElementAmount[element];
+        }
+
+        var oxygen = assembled.Problem.LinkAmount[assembled.OxygenLink];
+        var dissolves = assembled.Species.Any(s => s is { Phase: PhaseKind.Metal, Name: "O" });
+        return oxygen > capacity && (capacity > 0 || !dissolves)
+            ? new SolveOutcome.Failed(
+                SolveFailure.OxygenHasNoHome,
+                FormattableString.Invariant(
+                    $"The charge brings {oxygen:G4} mol of oxygen, but the elements present can bind only {capacity:G4} mol and no gas may form. Allow a gas, charge less oxygen, or state the oxygen potential."),
+                ["O"])
+            : null;
+    }
+
+    /// <summary>Failures of the iteration; null where it converged to a sensible state.</summary>
+    public static SolveOutcome.Failed? After(VesselAssembly assembly, EquilibriumState state)
+    {
+        switch (state.Result.Stop)
+        {
+            case SaddleSolver.Stop.Converged:
+                return null;
+            case SaddleSolver.Stop.PotentialUnbounded:
+                var link = assembly.Assembled.Links[Math.Max(0, state.Result.Culprit)];
+                var tooMuch = state.LinkPotential[Math.Max(0, state.Result.Culprit)] > 0;
+                return link == "O" && tooMuch
+                    ? new SolveOutcome.Failed(
+                        SolveFailure.OxygenHasNoHome,
+                        "The charge brings more oxygen than the phases present can hold. Allow a gas, charge less oxygen, or state the oxygen potential.",
+                        ["O"])
+                    : new SolveOutcome.Failed(
+                        SolveFailure.ElementHasNoHome,
+                        tooMuch
+                            ? $"The phases present cannot hold the {link} of the charge. Allow a gas or charge less of it."
+                            : $"Some elements can only be held together with {link}, and the charge brings too little of it. Charge more {link} or state its potential.",
+                        [link]);
+            case SaddleSolver.Stop.AmountUnbounded:
+                var phase = assembly.Assembled.Phases[Math.Max(0, state.Result.Culprit)];
+                return new SolveOutcome.Failed(
+                    SolveFailure.PressureExceeded,
+                    $"The stated oxygen potential would take an unlimited amount of {phase.ToString().ToLowerInvariant()}. State a lower oxygen potential or a higher pressure.",
+                    ["O"]);
+            default:
+                return new SolveOutcome.Failed(
+                    SolveFailure.NotConverged, "The iteration did not converge. Please report the case.", []);
+        }
+    }
+}

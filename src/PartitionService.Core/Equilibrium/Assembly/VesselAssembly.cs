@@ -1,0 +1,35 @@
+using PartitionService.Core.Catalogue;
+using PartitionService.Core.Thermodynamics;
+
+namespace PartitionService.Core.Equilibrium.Assembly;
+
+/// <summary>Turns a valid case into the solver's problem: charge, solvent, species, oxygen potential.</summary>
+internal sealed class VesselAssembly
+{
+    /// <summary>The charge, split.</summary>
+    public required ChargeAccount Account { get; init; }
+
+    /// <summary>The problem.</summary>
+    public required AssembledCase Assembled { get; init; }
+
+    /// <summary>Numbers that entered.</summary>
+    public required DatumLedger Ledger { get; init; }
+
+    /// <summary>Solvent.</summary>
+    public required string Solvent { get; init; }
+
+    /// <summary>Slag family; null without a slag.</summary>
+    public required SlagFamily? Family { get; init; }
+
+    /// <summary>Composition that slag coefficients were taken at; null without a slag.</summary>
+    public required SlagComposition? Composition { get; init; }
+
+    /// <summary>Slag species, for remarks about composition terms; null without a slag.</summary>
+    public required SlagSpecies? Slag { get; init; }
+
+    /// <summary>1/2 ln pO2 where the statement fixes it at once.</summary>
+    public required double? FixedOxygen { get; init; }
+
+    /// <summary>True where the stated oxygen potential leaves no room for a metal.</summary>
+    public required bool MetalExcluded { get; init; }
+}
