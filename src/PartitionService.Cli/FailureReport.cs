@@ -17,7 +17,7 @@ internal static class FailureReport
         var (code, lines) = Describe(fault);
         foreach (var line in lines)
             error.WriteLine(PlainText.Clean(line));
-        if (fault is PartitionException { RequestId.Length: > 0 } known)
+        if ((fault as PartitionException ?? fault.InnerException) is PartitionException { RequestId.Length: > 0 } known)
             error.WriteLine(PlainText.Clean($"Request id: {known.RequestId}"));
         return code;
     }

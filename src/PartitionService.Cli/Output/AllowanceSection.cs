@@ -23,9 +23,9 @@ internal static class AllowanceSection
         if (on.SlagInMetalMassPercent != 0)
             facts.Add($"{NumberText.Significant(on.SlagInMetalMassPercent)} % slag in the metal ({NumberText.Quantity(on.SlagInMetalKg)} kg)");
         if (on.MechanicalDustMassFraction != 0)
-            facts.Add($"{NumberText.Percent(on.MechanicalDustMassFraction)} % of the solid charge as mechanical dust");
+            facts.Add($"{NumberText.Significant(100 * on.MechanicalDustMassFraction)} % of the solid charge as mechanical dust");
         facts.AddRange(on.StageEfficiencies.Select(stage =>
-            $"{NumberText.Percent(stage.Efficiency)} % of {stage.Element} reaches equilibrium ({NumberText.Quantity(stage.BypassedKg)} kg pass by)"));
+            $"{NumberText.Significant(100 * stage.Efficiency)} % of {stage.Element} reaches equilibrium ({NumberText.Quantity(stage.BypassedKg)} kg pass by)"));
         if (facts.Count > 0)
             PlainText.WriteLabelled(output, "Allowances", AnswerTable.LabelWidth, string.Join("; ", facts), page.Width);
     }

@@ -5,7 +5,7 @@ namespace PartitionService.Cli.Output;
 /// <summary>The heart of the page: where each element goes.</summary>
 internal static class ElementSection
 {
-    private const int WidePage = 118;
+    private static readonly int[] BarCells = [20, 16, 12, 8];
 
     /// <summary>Writes the section.</summary>
     /// <param name="output">Takes the lines.</param>
@@ -13,29 +13,43 @@ internal static class ElementSection
     /// <param name="page">The page.</param>
     public static void Write(TextWriter output, ChargeAnswer answer, Page page)
     {
-        var hasDust = answer.Elements.Any(element => element.MechanicalDustFraction != 0);
-        var hasOther = answer.Elements.Any(element => element.UnburntCarbonFraction + element.UnplacedFraction != 0);
-        var cells = page.Width >= WidePage ? 20 : hasDust && hasOther ? 8 : 12;
-        var columns = new List<TableColumn>
-        {
-            new("", Alignment.Left), new("in, kg", Alignment.Decimal), new("metal %", Alignment.Decimal), new("slag %", Alignment.Decimal), new("gas %", Alignment.Decimal),
-        };
-        if (hasDust)
-            columns.Add(new("dust %", Alignment.Decimal));
-        if (hasOther)
-            columns.Add(new("else %", Alignment.Decimal));
-        columns.AddRange(
-        [
-            new("split", Alignment.Left), new("in metal", Alignment.Decimal), new("", Alignment.Left), new("in slag", Alignment.Decimal), new("", Alignment.Left), new("L slag/metal", Alignment.Decimal),
-        ]);
-        var table = new PlainTable([.. columns]);
-        foreach (var element in answer.Elements)
-            table.Add([.. Row(element, page.Bar, cells, hasDust, hasOther)]);
+        // The longest bar that fits; on a narrow page the shortest.
+        var tables = BarCells.Select(cells => Build(answer, page.Bar, cells)).ToArray();
+        var table = tables.FirstOrDefault(candidate => candidate.Measure() <= page.Width) ?? tables[^1];
         output.WriteLine("Where each element goes, % of what is charged");
         table.Write(output, page.Width);
-        output.WriteLine(page.Bar.Legend);
+        PlainText.WriteLabelled(output, "", 0, $"{page.Bar.Legend}; L = mass % in slag / mass % in metal at equilibrium, without allowances", page.Width);
         foreach (var element in answer.Elements.Where(element => element.UnplacedFraction != 0))
-            PlainText.WriteLabelled(output, "", 2, $"{element.Element}: {NumberText.Percent(element.UnplacedFraction)} % cannot be placed, the catalogue lacks the data.", page.Width);
+        {
+            var share = NumberText.Percent(element.UnplacedFraction);
+            PlainText.WriteLabelled(output, "", 0, $"{element.Element}: {share} % cannot be placed, the catalogue lacks the data.", page.Width);
+        }
+    }
+
+    private static PlainTable Build(ChargeAnswer answer, SplitBar bar, int cells)
+    {
+        var hasDust = answer.Elements.Any(element => element.MechanicalDustFraction != 0);
+        var hasOther = answer.Elements.Any(element => element.UnburntCarbonFraction + element.UnplacedFraction != 0);
+        TableColumn[] columns =
+        [
+            new("", Alignment.Left),
+            new("in, kg", Alignment.Decimal),
+            new("metal %", Alignment.Decimal),
+            new("slag %", Alignment.Decimal),
+            new("gas %", Alignment.Decimal),
+            .. hasDust ? [new TableColumn("dust %", Alignment.Decimal)] : Array.Empty<TableColumn>(),
+            .. hasOther ? [new TableColumn("other %", Alignment.Decimal)] : Array.Empty<TableColumn>(),
+            new("split", Alignment.Left),
+            new("in metal", Alignment.Decimal),
+            new("", Alignment.Left),
+            new("in slag", Alignment.Decimal),
+            new("", Alignment.Left),
+            new("L", Alignment.Decimal),
+        ];
+        var table = new PlainTable(columns);
+        foreach (var element in answer.Elements)
+            table.Add([.. Row(element, bar, cells, hasDust, hasOther)]);
+        return table;
     }
 
     private static IEnumerable<string> Row(ElementDistribution element, SplitBar bar, int cells, bool hasDust, bool hasOther)

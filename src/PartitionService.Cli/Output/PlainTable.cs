@@ -19,7 +19,8 @@ internal sealed record TableColumn(string Heading, Alignment Alignment);
 /// <param name="columns">Columns, at least one.</param>
 internal sealed class PlainTable(params TableColumn[] columns)
 {
-    private const string Gap = "  ";
+    private const string WideGap = "  ";
+    private const string NarrowGap = " ";
     private const int NarrowestLastColumn = 24;
 
     private readonly List<string[]> rows = [];
@@ -28,28 +29,42 @@ internal sealed class PlainTable(params TableColumn[] columns)
     /// <param name="cells">One text per column.</param>
     public void Add(params string[] cells) => rows.Add([.. cells.Select(PlainText.Clean)]);
 
+    /// <summary>Width that the table needs where nothing wraps and columns stand two blanks apart.</summary>
+    /// <returns>Width in characters.</returns>
+    public int Measure() => Widths(SetAll()).Sum() + (WideGap.Length * (columns.Length - 1));
+
     /// <summary>Writes headings and rows.</summary>
     /// <param name="output">Takes the lines.</param>
     /// <param name="width">Width of the page in characters.</param>
     public void Write(TextWriter output, int width)
     {
-        var set = columns.Select((column, index) => Set(column, [.. rows.Select(row => row[index])])).ToArray();
+        var set = SetAll();
+        var widths = Widths(set);
         var last = columns.Length - 1;
-        var widths = set.Select((cells, index) => Math.Max(columns[index].Heading.Length, cells.Select(cell => cell.Length).DefaultIfEmpty().Max())).ToArray();
-        var before = widths.Take(last).Sum() + (Gap.Length * last);
-        // A page that is too narrow for the fixed columns lets the terminal fold the line rather than losing text.
-        var lastWidth = Math.Max(width - before, columns[last].Alignment == Alignment.Left ? NarrowestLastColumn : widths[last]);
-        output.WriteLine(Join(columns.Select((column, index) => Pad(column, column.Heading, widths[index]))));
+        var wraps = columns[last].Alignment == Alignment.Left;
+        var needed = widths.Take(last).Sum() + (wraps ? NarrowestLastColumn : widths[last]);
+        // A page that is too narrow even so lets the terminal fold the line rather than losing text.
+        var gap = needed + (WideGap.Length * last) > width ? NarrowGap : WideGap;
+        var before = widths.Take(last).Sum() + (gap.Length * last);
+        var lastWidth = Math.Max(width - before, wraps ? NarrowestLastColumn : widths[last]);
+        output.WriteLine(Join(gap, columns.Select((column, index) => Pad(column, column.Heading, widths[index]))));
         for (var row = 0; row < rows.Count; row++)
         {
-            var lines = columns[last].Alignment == Alignment.Left ? PlainText.Wrap(set[last][row], lastWidth) : [set[last][row]];
-            output.WriteLine(Join(columns.Select((column, index) => index < last ? Pad(column, set[index][row], widths[index]) : Pad(column, lines[0], column.Alignment == Alignment.Left ? 0 : widths[last]))));
+            var cells = set.Select(column => column[row]).ToArray();
+            var lines = wraps ? PlainText.Wrap(cells[last], lastWidth) : [cells[last]];
+            cells[last] = lines[0];
+            output.WriteLine(Join(gap, columns.Select((column, index) => Pad(column, cells[index], widths[index]))));
             foreach (var line in lines.Skip(1))
                 output.WriteLine(new string(' ', before) + line);
         }
     }
 
-    private static string Join(IEnumerable<string> cells) => string.Join(Gap, cells).TrimEnd();
+    private string[][] SetAll() => [.. columns.Select((column, index) => Set(column, [.. rows.Select(row => row[index])]))];
+
+    private int[] Widths(string[][] set) =>
+        [.. set.Select((cells, index) => Math.Max(columns[index].Heading.Length, cells.Select(cell => cell.Length).DefaultIfEmpty().Max()))];
+
+    private static string Join(string gap, IEnumerable<string> cells) => string.Join(gap, cells).TrimEnd();
 
     private static string Pad(TableColumn column, string cell, int width) =>
         column.Alignment == Alignment.Left ? cell.PadRight(width) : cell.PadLeft(width);

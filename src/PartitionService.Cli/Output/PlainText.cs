@@ -45,6 +45,13 @@ internal static class PlainText
     /// <param name="width">Width of the page in characters.</param>
     public static void WriteLabelled(TextWriter output, string label, int labelWidth, string text, int width)
     {
+        // A label that would run into the text stands on a line of its own.
+        if (labelWidth > 0 && label.Length >= labelWidth)
+        {
+            output.WriteLine(label);
+            label = "";
+        }
+
         foreach (var line in Wrap(text, Math.Max(20, width - labelWidth)))
         {
             output.WriteLine((label.PadRight(labelWidth) + line).TrimEnd());

@@ -17,7 +17,7 @@ internal sealed record SplitBar(char Metal, char Slag, char Gas, char Dust, char
     public static SplitBar Letters { get; } = new('#', '=', '.', '-', '?');
 
     /// <summary>Explains the marks.</summary>
-    public string Legend => $"bar: {Metal} metal  {Slag} slag  {Gas} gas  {Dust} dust  {Other} elsewhere";
+    public string Legend => $"bar: {Metal} metal  {Slag} slag  {Gas} gas  {Dust} dust  {Other} other";
 
     /// <summary>Draws one bar.</summary>
     /// <param name="cells">Length in characters.</param>

@@ -137,7 +137,7 @@ public sealed class CaseFileReaderTests
     [Theory]
     [InlineData("closed_balanse", "3:9: oxygen: Keys with values are expected here: log10_po2_atm, co2_to_co_ratio, h2o_to_h2_ratio, metal_oxide_pair, dissolved_oxygen_mass_ppm, closed_balance.")]
     [InlineData("{}", "3:9: oxygen: One of these keys is missing: log10_po2_atm, co2_to_co_ratio, h2o_to_h2_ratio, metal_oxide_pair, dissolved_oxygen_mass_ppm, closed_balance.")]
-    [InlineData("{log10_po2_atm: -7, co2_to_co_ratio: 3}", "3:21: oxygen, co2_to_co_ratio: Only one of these keys may stand here: log10_po2_atm, co2_to_co_ratio.")]
+    [InlineData("{log10_po2_atm: -7, co2_to_co_ratio: 3}", "3:29: oxygen, co2_to_co_ratio: Only one of these keys may stand here: log10_po2_atm, co2_to_co_ratio.")]
     [InlineData("{metal_oxide_pair: {oxide_activity: 1}}", "3:28: oxygen, metal_oxide_pair: The key \"oxide\" is missing.")]
     [InlineData("{closed_balance: true}", "3:26: oxygen, closed_balance: This takes no numbers; write {} as its value.")]
     public void Names_what_is_wrong_with_oxygen(string oxygen, string expected) =>
@@ -151,7 +151,7 @@ public sealed class CaseFileReaderTests
             "1:1: The key \"oxygen\" is missing.",
             "1:1: One of these keys is missing: temperature_kelvin, temperature_celsius.",
             "1:1: Unknown key \"nam\"; did you mean \"name\"?",
-            "3:29: charge, item 1, mass_kg: \"x\" is not a number.",
+            "3:30: charge, item 1, mass_kg: \"x\" is not a number.",
             "4:4: charge, item 2: One of these keys is missing: mass_kg, volume_normal_cubic_metre.",
         ];
 
@@ -172,7 +172,7 @@ public sealed class CaseFileReaderTests
 
     [Fact]
     public void Tells_where_the_text_stops_being_yaml() =>
-        Assert.StartsWith("2:", Assert.Single(Errors("name: x\n\tcharge: y\n")), StringComparison.Ordinal);
+        Assert.StartsWith("2:10: This is not valid YAML: ", Assert.Single(Errors("name: x\ncharge: [}\n")), StringComparison.Ordinal);
 
     [Theory]
     [InlineData(100_000)]

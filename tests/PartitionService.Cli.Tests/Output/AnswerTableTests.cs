@@ -22,7 +22,7 @@ public sealed class AnswerTableTests
         Assert.Matches(@"(?m)^Cu +1000 +98\.500 +1\.500 +<0\.001 +0 +0 ", text);
         Assert.Matches(@"(?m)^Pd +0\.2500 +>99\.999 +<0\.001 +0 +0 +0 .* 250 +ppm +2\.50e-6 +ppm +1\.20e-8$", text);
         Assert.Matches(@"(?m)^Au +0\.5000 +100 +0 +0 +0 +0 .* 500 +ppm +0 +ppm +-$", text);
-        Assert.Matches(@"(?m)^Te +0\.1000 +0 +0 +0 +0 +100 +\?\?\?\?\?\?\?\? +- +- +-$", text);
+        Assert.Matches(@"(?m)^Te +0\.1000 +0 +0 +0 +0 +100 +\?{8,20} +- +- +-$", text);
     }
 
     [Theory]
@@ -30,12 +30,12 @@ public sealed class AnswerTableTests
     [InlineData("Slag         190.0 kg, cation fractions FeO 0.600")]
     [InlineData("Gas          29.10 Nm3, 38.00 kg; by volume N2 97.000 %, Ag <0.001 %; 41.2 g/Nm3 of elements that turn into fume")]
     [InlineData("Dust         0.02000 kg of the charge leave unreacted")]
-    [InlineData("Solvent lost 1.500 % of 1000 kg Cu: 12.00 kg dissolved in the slag, 3.000 kg as droplets in the slag, 1.000e-6 kg in the gas")]
+    [InlineData("Solvent lost 1.500 % of 1000 kg Cu: 12.00 kg dissolved in the slag, 3.000 kg as droplets in the slag, 1.000e-6 kg in")]
     [InlineData("Oxygen       log10 pO2/atm -7.00, -210.8 kJ/mol O2, CO2/CO 22.1, H2O/H2 11.0, 750 ppm O dissolved in the metal, 12.50 kg")]
     [InlineData("             (8.755 Nm3) O2 to remove")]
-    [InlineData("Allowances   0.500 % metal droplets in the slag (0.9500 kg, typical value entrainment/iron-silicate); 1.000 % of the solid")]
-    [InlineData("SERIOUS      No datum places tellurium in any phase of this vessel, so that its share is left open and the figures of the")]
-    [InlineData("             other elements take no account of it.")]
+    [InlineData("Allowances   0.500 % metal droplets in the slag (0.9500 kg, typical value entrainment/iron-silicate); 1.00 % of the")]
+    [InlineData("SERIOUS      No datum places tellurium in any phase of this vessel, so that its share is left open and the figures of")]
+    [InlineData("             the other elements take no account of it.")]
     [InlineData("Note         Some numbers are recalled.")]
     [InlineData("Zn           Zinc fume; local codes and licensed practice decide. (40.5 g/Nm3 in the gas)")]
     [InlineData("Data         3 rows: 1 computed from seen numbers, 1 recalled, not checked, 1 given by the case; weakest: recalled, not")]
@@ -45,7 +45,7 @@ public sealed class AnswerTableTests
     [Fact]
     public void Lists_the_data_on_demand()
     {
-        var text = Render(HandMadeAnswer.Create(), showData: true);
+        var text = Render(HandMadeAnswer.Create(), 160, showData: true);
 
         Assert.Matches(@"metal/Cu/Pb#1 +1\.300 +0\.250 +1 +ln gamma0 of Pb in liquid Cu; computed from seen numbers; a-1974", text);
         Assert.Matches(@"oxidation/PbO#1 +-7\.500e4 +- +J/mol +Gibbs energy; recalled, not checked; 12 K outside its range", text);

@@ -12,7 +12,7 @@ public sealed class PlainTableTests
         table.Add("Pd", "0.25", "1.20e-8");
         table.Add("Zn", "<0.001", "-");
 
-        Assert.Equal(["           kg        L", "Cu  1000      0.0123", "Pd     0.25   1.20e-8", "Zn    <0.001  -"], Lines(table, 80).Select(line => line.TrimEnd()));
+        Assert.Equal(["          kg        L", "Cu  1000      0.0123", "Pd     0.25   1.20e-8", "Zn    <0.001  -"], Lines(table, 80).Select(line => line.TrimEnd()));
     }
 
     [Fact]
