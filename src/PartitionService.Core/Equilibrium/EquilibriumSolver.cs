@@ -44,7 +44,7 @@ public sealed class EquilibriumSolver(ThermochemicalCatalogue catalogue)
         var work = threadWorkspace ??= new SolverWorkspace();
         double? dissolved = vesselCase.Oxygen is OxygenStatement.Dissolved statement ? 1e-6 * statement.MassPpm : null;
         var state = ActivityIteration.Solve(
-            assembly.Assembled, dissolved, Catalogue.Elements, work, cancellation);
+            assembly, dissolved, Catalogue.Elements, work, cancellation);
         return FailureRules.After(assembly, state) is { } failed
             ? failed
             : new SolveOutcome.Solved(new AnswerBuilder(vesselCase, Catalogue, assembly, state).Build());

@@ -62,6 +62,21 @@ public sealed record SlagComposition(IReadOnlyDictionary<string, double> MassPer
         return below > 0 ? above / below : null;
     }
 
+    /// <summary>Mol of mono-cations in 100 g of slag.</summary>
+    public double MonoCationMolPer100Gram(IReadOnlyDictionary<string, Element> elements)
+    {
+        var sum = 0.0;
+        foreach (var (oxide, massPercent) in MassPercent)
+        {
+            if (ChemicalFormula.TryParse(oxide, out var formula, out _))
+            {
+                sum += massPercent / formula.MolarMass(elements) * formula.Atoms.Where(atom => atom.Key != "O").Sum(atom => atom.Value);
+            }
+        }
+
+        return sum;
+    }
+
     private double? BasicitySum(IReadOnlyDictionary<string, Element> elements)
     {
         double moles = 0, sum = 0;

@@ -11,18 +11,22 @@ namespace PartitionService.Core.Equilibrium.Assembly;
 internal static class ActivityIteration
 {
     /// <summary>Solves the case.</summary>
-    /// <param name="assembled">The case; its ln K of metal species are updated.</param>
+    /// <param name="assembly">The case; its ln K of metal and slag species are updated.</param>
     /// <param name="dissolvedOxygenMassFraction">Stated oxygen of the metal as a mass fraction; null with any other statement.</param>
     /// <param name="elements">Atomic masses.</param>
     /// <param name="work">Buffers; hold the solution afterwards.</param>
     /// <param name="cancellation">Stops the iteration.</param>
     public static EquilibriumState Solve(
-        AssembledCase assembled,
+        VesselAssembly assembly,
         double? dissolvedOxygenMassFraction,
         IReadOnlyDictionary<string, Element> elements,
         SolverWorkspace work,
         CancellationToken cancellation)
     {
+        var assembled = assembly.Assembled;
+        var slag = assembly.Terms is null ? null : new SlagIteration(assembly, elements);
+        slag = slag is { IsEmpty: false } ? slag : null;
+        slag?.Start();
         var problem = assembled.Problem;
         var metal = assembled.SolventSpecies < 0 ? [] : assembled.MetalSolutes;
         var lnGamma = new double[metal.Length];
@@ -40,7 +44,7 @@ internal static class ActivityIteration
         var passes = 0;
         var damping = 1.0;
         var lastChange = double.PositiveInfinity;
-        var settled = assembled.Interactions.IsEmpty && dissolvedOxygenMassFraction is null;
+        var settled = assembled.Interactions.IsEmpty && dissolvedOxygenMassFraction is null && slag is null;
         while (result.Stop == SaddleSolver.Stop.Converged && !settled)
         {
             if (++passes > Convergence.ActivityPassLimit)
@@ -69,6 +73,11 @@ internal static class ActivityIteration
                 change = Math.Max(change, Math.Abs(target - problem.LinkPotential[assembled.OxygenLink]));
             }
 
+            if (slag is not null)
+            {
+                change = Math.Max(change, slag.Move(work, damping));
+            }
+
             settled = change <= Convergence.ActivityTolerance;
             damping = change > 0.9 * lastChange ? Math.Max(0.05, 0.7 * damping) : Math.Min(1, 1.1 * damping);
             lastChange = change;
@@ -79,7 +88,11 @@ internal static class ActivityIteration
                 problem.LnK[metal[i]] = -lnGamma[i];
             }
 
-            problem.LnK[assembled.SolventSpecies] = -solventLnGamma;
+            if (assembled.SolventSpecies >= 0)
+            {
+                problem.LnK[assembled.SolventSpecies] = -solventLnGamma;
+            }
+
             if (potential is { } next)
             {
                 problem.LinkPotential[assembled.OxygenLink] += damping * (next - problem.LinkPotential[assembled.OxygenLink]);

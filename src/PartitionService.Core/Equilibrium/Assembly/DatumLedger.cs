@@ -45,6 +45,15 @@ internal sealed class DatumLedger(
         return overridden.Keys.Where(slot => slot.StartsWith(prefix, StringComparison.Ordinal)).Select(slot => slot[prefix.Length..]);
     }
 
+    /// <summary>Replaces the value of a slot's only use by the one at the final composition.</summary>
+    public void Adjust(string slot, double value)
+    {
+        if (bySlot.TryGetValue(slot, out var uses) && uses.Count == 1 && !uses[0].Overridden)
+        {
+            uses[0] = uses[0] with { Value = value };
+        }
+    }
+
     /// <summary>Remembers that a row entered with a value; the caller's number where it was overridden.</summary>
     public void Take(string slot, Datum? row, string quantity, double value, string unit, double? sigma)
     {

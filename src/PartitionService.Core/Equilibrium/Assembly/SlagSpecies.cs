@@ -5,14 +5,12 @@ namespace PartitionService.Core.Equilibrium.Assembly;
 
 /// <summary>Species of the slag: mononuclear oxides and chlorides, and sulfide by the sulfide capacity.</summary>
 /// <param name="family">Slag family.</param>
-/// <param name="composition">Composition that activity coefficients depend on.</param>
 /// <param name="solvent">Solvent, whose rows decide the state of the metal in the oxidation rows.</param>
 /// <param name="temperatureKelvin">Temperature in kelvin.</param>
 /// <param name="catalogue">The catalogue.</param>
 /// <param name="ledger">Rows and overrides.</param>
 internal sealed class SlagSpecies(
     SlagFamily family,
-    SlagComposition composition,
     string solvent,
     double temperatureKelvin,
     ThermochemicalCatalogue catalogue,
@@ -20,20 +18,18 @@ internal sealed class SlagSpecies(
 {
     private readonly double thermal = PhysicalConstants.GasConstant * temperatureKelvin;
 
-    /// <summary>Composition terms that were left out or used outside the family's window.</summary>
-    public List<CompositionTerm> CompositionTerms { get; } = [];
-
-    /// <summary>Optical basicity of the slag where sulfide was computed; null otherwise.</summary>
-    public double? OpticalBasicity { get; private set; }
-
-    /// <summary>A composition term of one activity coefficient.</summary>
-    /// <param name="Row">The row.</param>
-    /// <param name="Value">Value of the variable; null where it is not known and the term was left out.</param>
-    public sealed record CompositionTerm(SlagActivityDatum Row, double? Value);
+    /// <summary>Constants that depend on the composition of the slag.</summary>
+    public SlagTerms Terms { get; } = new(family, temperatureKelvin, catalogue);
 
     /// <summary>Species of one element; empty where the family has none.</summary>
     public IEnumerable<SpeciesRecord> Create(Element element)
     {
+        if (element.Symbol == "P" && PhosphorusByFormula() is { } phosphorus)
+        {
+            yield return phosphorus;
+            yield break;
+        }
+
         foreach (var oxide in SlagIndex.For(catalogue).Oxides(family.Name, element.Symbol, ledger))
         {
             var slot = $"slag/{family.Name}/{oxide}";
@@ -48,30 +44,42 @@ internal sealed class SlagSpecies(
         }
     }
 
-    /// <summary>Sulfide, ln x = ln C_S - ln(32.06 n) + 1/2 ln pS2 - 1/2 ln pO2 with n mol of cations in 100 g; null where no formula applies.</summary>
-    /// <remarks>C_S = (mass % S)(pO2/pS2)^(1/2), Sosinsky and Sommerville 1986. A sulfide ion replaces an oxide ion.</remarks>
+    /// <summary>Sulfide by the sulfide capacity; null where the family has no formula. A sulfide ion replaces an oxide ion.</summary>
     public SpeciesRecord? Sulfide()
     {
         if (!family.CapacityFormulas.Contains("sosinsky-cs")
-            || composition.OpticalBasicity(catalogue) is not { } basicity
-            || ledger.Select<CapacityDatum>(Thermodynamics.SulfideCapacity.Slot) is not { } row)
+            || ledger.Select<CapacityDatum>(SulfideCapacity.Slot) is not { } row)
         {
             return null;
         }
 
-        OpticalBasicity = basicity;
-        var log10 = Thermodynamics.SulfideCapacity.Log10(basicity, temperatureKelvin);
-        ledger.Take(row.Slot, row, "log10 of the sulfide capacity", log10, "mass %", row.SigmaLog10);
-        var sulfurMass = catalogue.Elements["S"].AtomicMassGramPerMol;
+        ledger.Take(row.Slot, row, "log10 of the sulfide capacity", 0, "1", row.SigmaLog10);
+        Terms.Add(new SlagTerms.Term(SlagTerms.TermKind.Sulfide, "S", row.Slot, 0, null));
         return new SpeciesRecord(
             "S",
             PhaseKind.Slag,
             null,
             new Dictionary<string, double>(StringComparer.Ordinal) { ["S"] = 1, ["O"] = -1 },
-            (log10 * Math.Log(10)) - Math.Log(sulfurMass * family.MonoCationMolPer100Gram),
+            0,
             null,
             "",
             [row.Slot]);
+    }
+
+    /// <summary>Phosphorus in steelmaking slag over iron: the partition formula goes before the activity coefficient.</summary>
+    private SpeciesRecord? PhosphorusByFormula()
+    {
+        if (solvent != "Fe" || !family.CapacityFormulas.Contains("suito-inoue-1995-lp")
+            || ledger.Override($"slag/{family.Name}/PO2.5") is not null
+            || ledger.Select<InfiniteDilutionDatum>(MetalSpecies.Slot(solvent, "P")) is null
+            || ledger.Select<CapacityDatum>(PhosphorusPartition.Slot) is not { } row)
+        {
+            return null;
+        }
+
+        ledger.Take(row.Slot, row, "log10 of the phosphorus partition", 0, "1", row.SigmaLog10);
+        Terms.Add(new SlagTerms.Term(SlagTerms.TermKind.Phosphorus, "PO2.5", row.Slot, 0, null));
+        return Species("PO2.5", "P", 2.5, 0, 0, null, "", [row.Slot]);
     }
 
     private SpeciesRecord? Product(Element element, string slot, SlagActivityDatum row)
@@ -133,6 +141,11 @@ internal sealed class SlagSpecies(
             oxidation.SigmaJoulePerMol);
         var lnGamma = row is null ? OverrideOnly(slot, oxide) : LnGamma(slot, row);
         var lnK = (-energy / thermal) - (given is null ? conversion : 0) - lnGamma;
+        if (row?.Variable is not null && ledger.Override(slot) is null)
+        {
+            Terms.Add(new SlagTerms.Term(SlagTerms.TermKind.Slope, oxide, slot, lnK, row));
+        }
+
         return Species(
             oxide, element.Symbol, oxidation.OxygenPerMetal, 0, lnK, lnGamma, $"pure {Words(state)} oxide", [slot, oxidationSlot]);
     }
@@ -167,13 +180,6 @@ internal sealed class SlagSpecies(
         }
 
         var value = row.LnGamma(temperatureKelvin);
-        if (row.Variable is { } variable)
-        {
-            var known = composition.IsTypical ? null : composition.Variable(variable, catalogue.Elements);
-            value += known is { } number ? row.Slope * (number - row.VariableReference) : 0;
-            CompositionTerms.Add(new CompositionTerm(row, known));
-        }
-
         ledger.Take(slot, row, quantity, value, "1", row.SigmaLnGamma);
         return value;
     }

@@ -64,8 +64,7 @@ internal sealed class VesselAssembler(VesselCase vesselCase, ThermochemicalCatal
             }
         }
 
-        var composition = family is null ? null : SlagChargeComposition.Of(account, family, catalogue);
-        var slag = family is null ? null : new SlagSpecies(family, composition!, solvent, temperature, catalogue, ledger);
+        var slag = family is null ? null : new SlagSpecies(family, solvent, temperature, catalogue, ledger);
         if (slag is not null)
         {
             species.AddRange(present.Order(StringComparer.Ordinal).SelectMany(e => slag.Create(catalogue.Elements[e])));
@@ -89,7 +88,7 @@ internal sealed class VesselAssembler(VesselCase vesselCase, ThermochemicalCatal
         var metalExcluded = ExcludeMetal(species, fixedOxygen, family is not null, out failure);
         return failure is not null
             ? null
-            : Build(account, species, solvent, family, composition, slag, fixedOxygen, metalExcluded, present);
+            : Build(account, species, solvent, family, slag?.Terms, fixedOxygen, metalExcluded, present);
     }
 
     private VesselAssembly Build(
@@ -97,8 +96,7 @@ internal sealed class VesselAssembler(VesselCase vesselCase, ThermochemicalCatal
         List<SpeciesRecord> species,
         string solvent,
         SlagFamily? family,
-        SlagComposition? composition,
-        SlagSpecies? slag,
+        SlagTerms? terms,
         double? fixedOxygen,
         bool metalExcluded,
         HashSet<string> present)
@@ -136,8 +134,7 @@ internal sealed class VesselAssembler(VesselCase vesselCase, ThermochemicalCatal
             Ledger = ledger,
             Solvent = solvent,
             Family = family,
-            Composition = composition,
-            Slag = slag,
+            Terms = terms,
             FixedOxygen = fixedOxygen,
             MetalExcluded = metalExcluded,
         };

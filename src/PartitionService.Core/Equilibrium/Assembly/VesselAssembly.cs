@@ -1,5 +1,4 @@
 using PartitionService.Core.Catalogue;
-using PartitionService.Core.Thermodynamics;
 
 namespace PartitionService.Core.Equilibrium.Assembly;
 
@@ -21,11 +20,8 @@ internal sealed class VesselAssembly
     /// <summary>Slag family; null without a slag.</summary>
     public required SlagFamily? Family { get; init; }
 
-    /// <summary>Composition that slag coefficients were taken at; null without a slag.</summary>
-    public required SlagComposition? Composition { get; init; }
-
-    /// <summary>Slag species, for remarks about composition terms; null without a slag.</summary>
-    public required SlagSpecies? Slag { get; init; }
+    /// <summary>Slag constants that depend on the slag's composition; null without a slag.</summary>
+    public required SlagTerms? Terms { get; init; }
 
     /// <summary>1/2 ln pO2 where the statement fixes it at once.</summary>
     public required double? FixedOxygen { get; init; }

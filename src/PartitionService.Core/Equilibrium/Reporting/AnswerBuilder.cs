@@ -17,6 +17,11 @@ internal sealed class AnswerBuilder(
     /// <summary>Builds the answer.</summary>
     public VesselAnswer Build()
     {
+        foreach (var term in assembly.Terms?.All ?? [])
+        {
+            assembly.Ledger.Adjust(term.Slot, term.DatumValue);
+        }
+
         var elements = Distributions(out var balanceError);
         var gas = GasReporter.Report(state, streams, vesselCase.PressureAtm, catalogue.Elements);
         var data = UsedData();

@@ -63,26 +63,23 @@ internal static class CompositionRemarks
 
     private static IEnumerable<Remark> Slag(ReportContext context)
     {
-        if (!context.HasSlag || context.Assembly.Slag is not { } slag || context.Assembly.Family is not { } family)
+        if (!context.HasSlag || context.Assembly.Terms is not { } terms || context.Assembly.Family is not { } family)
         {
             yield break;
         }
 
-        foreach (var term in slag.CompositionTerms)
+        foreach (var term in terms.All.Where(term => term.Index >= 0 && term.Bounded))
         {
-            if (term.Value is null)
-            {
-                yield return new Remark(
-                    RemarkCode.ExtrapolatedInComposition,
-                    Severity.Note,
-                    term.Row.Element,
-                    term.Row.Slot,
-                    $"The slag composition is not given, so the composition term of {term.Row.Oxide} was left out.",
-                    []);
-            }
+            yield return new Remark(
+                RemarkCode.ExtrapolatedInComposition,
+                Severity.Note,
+                term.Row!.Element,
+                term.Slot,
+                $"The composition term of {term.Species} in {family.Name} slag was held at the edge of the family's window.",
+                [new RemarkNumber("variable", term.Variable ?? double.NaN, "1")]);
         }
 
-        if (slag.OpticalBasicity is { } basicity && basicity is < 0.6 or > 0.85)
+        if (terms.OpticalBasicity is { } basicity && basicity is < 0.6 or > 0.85)
         {
             yield return new Remark(
                 RemarkCode.ExtrapolatedInComposition,

@@ -54,7 +54,7 @@ internal static class CondensedPhaseReporter
             var mass = record.Atoms.Sum(atom => atom.Value * elements[atom.Key].AtomicMassGramPerMol) * amount / 1000;
             double? gamma = record.LnGamma is null ? null
                 : phase == PhaseKind.Metal ? Math.Exp(-state.Assembled.Problem.LnK[s])
-                : Math.Exp(record.LnGamma.Value);
+                : Math.Exp(record.LnGamma.Value + record.LnK - state.Assembled.Problem.LnK[s]);
             contents.Add(new SpeciesContent(
                 record.Name, state.MoleFraction[s], amount, mass, gamma * state.MoleFraction[s], gamma, record.StandardState));
         }

@@ -1,0 +1,111 @@
+using PartitionService.Core.Catalogue;
+using PartitionService.Core.Equilibrium.Solvers;
+using PartitionService.Core.Thermodynamics;
+
+namespace PartitionService.Core.Equilibrium.Assembly;
+
+/// <summary>Moves the slag constants that depend on composition towards the composition of the solution.</summary>
+internal sealed class SlagIteration
+{
+    private readonly AssembledCase assembled;
+    private readonly VesselAssembly assembly;
+    private readonly SlagTerms terms;
+    private readonly IReadOnlyDictionary<string, Element> elements;
+    private readonly int slagPhase;
+    private readonly (string Element, double Mol)[] inert;
+
+    /// <summary>Prepares the terms of an assembled case.</summary>
+    public SlagIteration(VesselAssembly assembly, IReadOnlyDictionary<string, Element> elements)
+    {
+        this.assembly = assembly;
+        this.elements = elements;
+        assembled = assembly.Assembled;
+        terms = assembly.Terms!;
+        slagPhase = Array.IndexOf(assembled.Phases, PhaseKind.Slag);
+        inert = [.. assembly.Account.Inert.Elements.Select(e => (e, assembly.Account.Inert[e]))];
+        foreach (var term in terms.All)
+        {
+            term.Index = Array.FindIndex(assembled.Species, s => s.Phase == PhaseKind.Slag && s.Name == term.Species);
+        }
+    }
+
+    /// <summary>True where nothing depends on the slag's composition.</summary>
+    public bool IsEmpty => !terms.All.Any(term => term.Index >= 0);
+
+    /// <summary>Sets the constants at the composition of the charge, or the family's usual one.</summary>
+    public void Start()
+    {
+        var slag = WholeOxides.OfCharge(assembly.Account, elements) ?? SlagComposition.Typical(assembly.Family!);
+        var iron = elements[assembly.Solvent].AtomicMassGramPerMol;
+        var metal = new SlagTerms.MetalSide(LnGammaPhosphorus(), iron, assembled.OxygenLink >= 0 ? -10 : 0);
+        foreach (var term in terms.All.Where(term => term.Index >= 0))
+        {
+            assembled.Problem.LnK[term.Index] = terms.LnK(term, slag, metal);
+        }
+    }
+
+    /// <summary>Moves every constant by a share of its distance from the solution's composition.</summary>
+    /// <returns>The largest distance.</returns>
+    public double Move(SolverWorkspace work, double share)
+    {
+        var slag = WholeOxides.Composition(Amounts(work), elements) ?? SlagComposition.Typical(assembly.Family!);
+        var metal = new SlagTerms.MetalSide(
+            LnGammaPhosphorus(), MeanMetalMass(work), assembled.OxygenLink >= 0 ? work.Link[assembled.OxygenLink] : 0);
+        var largest = 0.0;
+        foreach (var term in terms.All)
+        {
+            if (term.Index < 0)
+            {
+                continue;
+            }
+
+            var distance = terms.LnK(term, slag, metal) - assembled.Problem.LnK[term.Index];
+            largest = Math.Max(largest, Math.Abs(distance));
+            assembled.Problem.LnK[term.Index] += share * distance;
+        }
+
+        return largest;
+    }
+
+    private IEnumerable<(string Element, double Mol)> Amounts(SolverWorkspace work)
+    {
+        var problem = assembled.Problem;
+        var scale = work.Present[slagPhase] ? work.PhaseAmount[slagPhase] : 1;
+        for (var s = 0; s < assembled.Species.Length; s++)
+        {
+            if (problem.Phase[s] == slagPhase && assembled.Species[s] is { Carried: { } element } record)
+            {
+                yield return (record.Name == "FeO1.5" ? record.Name : element, scale * work.MoleFraction[s]);
+            }
+        }
+
+        if (work.Present[slagPhase])
+        {
+            foreach (var entry in inert)
+            {
+                yield return entry;
+            }
+        }
+    }
+
+    private double LnGammaPhosphorus()
+    {
+        var species = Array.FindIndex(assembled.Species, s => s is { Phase: PhaseKind.Metal, Name: "P" });
+        return species < 0 ? 0 : -assembled.Problem.LnK[species];
+    }
+
+    private double MeanMetalMass(SolverWorkspace work)
+    {
+        double mass = 0, sum = 0;
+        for (var s = 0; s < assembled.Species.Length; s++)
+        {
+            if (assembled.Species[s].Phase == PhaseKind.Metal)
+            {
+                mass += work.MoleFraction[s] * elements[assembled.Species[s].Name].AtomicMassGramPerMol;
+                sum += work.MoleFraction[s];
+            }
+        }
+
+        return sum > 0 ? mass / sum : elements[assembly.Solvent].AtomicMassGramPerMol;
+    }
+}
