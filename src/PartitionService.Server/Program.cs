@@ -13,3 +13,9 @@ catch (OptionsValidationException settings)
         await Console.Error.WriteLineAsync(failure);
     return 2;
 }
+catch (IOException notListening)
+{
+    // The port is taken, or the address is not one of this machine; the message says which.
+    await Console.Error.WriteLineAsync(notListening.Message);
+    return 3;
+}

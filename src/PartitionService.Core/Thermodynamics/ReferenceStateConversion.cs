@@ -14,9 +14,6 @@ namespace PartitionService.Core.Thermodynamics;
 /// </remarks>
 public static class ReferenceStateConversion
 {
-    /// <summary>Molar gas constant in J/(mol K), exact since the 2019 revision of the SI.</summary>
-    public const double GasConstantJoulePerMolKelvin = 8.31446261815324;
-
     /// <summary>Mole fraction from mass %, exact for a binary: x = (w/M_i)/(w/M_i + (100 - w)/M_s).</summary>
     /// <param name="massPercent">Mass % of the solute, in [0, 100].</param>
     /// <param name="soluteMassGramPerMol">M_i.</param>
@@ -63,7 +60,7 @@ public static class ReferenceStateConversion
     /// <returns>J per mol of solute atoms; negative where the element dissolves readily.</returns>
     public static double GibbsEnergyToOneMassPercent(
         double temperatureKelvin, double lnGamma0, double soluteMassGramPerMol, double solventMassGramPerMol) =>
-        GasConstantJoulePerMolKelvin
+        PhysicalConstants.GasConstant
         * temperatureKelvin
         * (lnGamma0 - Math.Log(DiluteMassPercentPerMoleFraction(soluteMassGramPerMol, solventMassGramPerMol)));
 }

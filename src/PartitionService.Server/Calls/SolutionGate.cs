@@ -3,7 +3,10 @@ using PartitionService.Server.Options;
 namespace PartitionService.Server.Calls;
 
 /// <summary>Lets a bounded number of solutions run at a time.</summary>
-/// <remarks>A solution keeps a thread busy; without a bound a burst would starve the thread pool and with it the health checks.</remarks>
+/// <remarks>
+/// A solution keeps a thread busy from start to end. It runs on a thread of its own, which costs little beside a solution, so
+/// that the thread pool stays free for health checks and for the calls that wait.
+/// </remarks>
 internal sealed class SolutionGate(ServerOptions options) : IDisposable
 {
     private readonly SemaphoreSlim free = new(options.ParallelSolutionsOrProcessors);
@@ -15,7 +18,11 @@ internal sealed class SolutionGate(ServerOptions options) : IDisposable
         await free.WaitAsync(cancellation);
         try
         {
-            return compute(cancellation);
+            return await Task.Factory.StartNew(
+                () => compute(cancellation),
+                cancellation,
+                TaskCreationOptions.LongRunning | TaskCreationOptions.DenyChildAttach,
+                TaskScheduler.Default);
         }
         finally
         {

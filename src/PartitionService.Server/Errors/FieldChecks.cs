@@ -1,34 +1,29 @@
 using System.Globalization;
 using PartitionService.Core.Equilibrium;
+using PartitionService.Core.Thermodynamics;
 
 namespace PartitionService.Server.Errors;
 
 /// <summary>Checks of fields outside a vessel; each adds a violation with value and allowed range.</summary>
 internal static class FieldChecks
 {
-    /// <summary>Lowest temperature of a request in kelvin.</summary>
-    public const double MinimumTemperatureKelvin = 500;
-
-    /// <summary>Highest temperature of a request in kelvin.</summary>
-    public const double MaximumTemperatureKelvin = 2500;
-
     /// <summary>A number between two ends, both inclusive; NaN is refused.</summary>
-    public static void Range(
-        ICollection<CaseViolation> violations, string field, double value, double minimum, double maximum, string unit)
+    public static void Range(ICollection<CaseViolation> violations, string field, double value, double minimum, double maximum)
     {
         if (!(value >= minimum && value <= maximum))
-            violations.Add(new CaseViolation(field, Text(value), $"allowed is [{Text(minimum)}, {Text(maximum)}]{(unit.Length > 0 ? " " + unit : "")}"));
+            violations.Add(new CaseViolation(field, Text(value), $"must be a number in [{Text(minimum)}, {Text(maximum)}]"));
     }
 
     /// <summary>A temperature in kelvin.</summary>
     public static void Temperature(ICollection<CaseViolation> violations, double value) =>
-        Range(violations, "temperature_kelvin", value, MinimumTemperatureKelvin, MaximumTemperatureKelvin, "K");
+        Range(violations, "temperature_kelvin", value, PhysicalConstants.MinimumTemperatureKelvin, PhysicalConstants.MaximumTemperatureKelvin);
 
     /// <summary>A text of limited length.</summary>
     public static void Length(ICollection<CaseViolation> violations, string field, string value, int maximum)
     {
         if (value.Length > maximum)
-            violations.Add(new CaseViolation(field, value, string.Create(CultureInfo.InvariantCulture, $"allowed are at most {maximum} characters")));
+            violations.Add(new CaseViolation(
+                field, Text(value.Length) + " characters long", string.Create(CultureInfo.InvariantCulture, $"must have at most {maximum} characters")));
     }
 
     /// <summary>A word from a list.</summary>
@@ -37,7 +32,7 @@ internal static class FieldChecks
         if (value.Length == 0)
             violations.Add(new CaseViolation(field, "", $"required: {what}"));
         else if (!allowed.Contains(value))
-            violations.Add(new CaseViolation(field, value, $"allowed is {what}"));
+            violations.Add(new CaseViolation(field, value, $"must be {what}"));
     }
 
     /// <summary>Refuses the request where anything was found.</summary>

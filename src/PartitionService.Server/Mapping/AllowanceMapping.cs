@@ -35,10 +35,10 @@ internal static class AllowanceMapping
             case Wire.EntrainedMetal.BasisOneofCase.FamilyTypical when sent.FamilyTypical:
                 return mapped with { MetalInSlagTypical = true };
             case Wire.EntrainedMetal.BasisOneofCase.FamilyTypical:
-                violations.Add(new CaseViolation(path + ".family_typical", "false", "only true is allowed; leave metal_in_slag unset for none"));
+                violations.Add(new CaseViolation(path + ".family_typical", "false", "must be true; leave metal_in_slag unset for none"));
                 return mapped;
             default:
-                violations.Add(new CaseViolation(path, "", "required: exactly one of mass_percent and family_typical"));
+                violations.Add(new CaseViolation(path, "", "needs exactly one of mass_percent, family_typical"));
                 return mapped;
         }
     }

@@ -36,16 +36,17 @@ public sealed class ServerOptions
 
     /// <summary>Whether gRPC server reflection is served. Unset: on in the environment Development or on a loopback address.</summary>
     /// <value>The default is unset.</value>
+    [OptionalSwitch]
     public bool? Reflection { get; set; }
 
     /// <summary>Where log events go, one JSON object a line.</summary>
     /// <value>The default is <see cref="Options.LogOutput.StandardOutput"/>.</value>
-    [KnownName]
+    [KnownName(typeof(LogOutput))]
     public LogOutput LogOutput { get; set; } = LogOutput.StandardOutput;
 
     /// <summary>Least severe level that is logged.</summary>
     /// <value>The default is <see cref="LogLevel.Information"/>.</value>
-    [KnownName]
+    [KnownName(typeof(LogLevel))]
     public LogLevel LogLevel { get; set; } = LogLevel.Information;
 
     /// <summary>The address of <see cref="ListenAddress"/>.</summary>

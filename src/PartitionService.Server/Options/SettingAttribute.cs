@@ -11,6 +11,10 @@ public abstract class SettingAttribute : ValidationAttribute
     /// <summary>What is allowed, in words.</summary>
     public abstract string Allowed { get; }
 
+    /// <summary>The message about a bad setting.</summary>
+    internal static string Message(string? name, string? value, string allowed) =>
+        $"{ServerOptions.Section}:{name} is '{value}'; allowed is {allowed}.";
+
     /// <inheritdoc/>
     protected override ValidationResult? IsValid(object? value, ValidationContext validationContext)
     {
@@ -18,8 +22,7 @@ public abstract class SettingAttribute : ValidationAttribute
         if (IsValid(value))
             return ValidationResult.Success;
         var shown = Convert.ToString(value, CultureInfo.InvariantCulture);
-        return new ValidationResult(
-            $"{ServerOptions.Section}:{validationContext.MemberName} is '{shown}'; allowed is {Allowed}.", [validationContext.MemberName!]);
+        return new ValidationResult(Message(validationContext.MemberName, shown, Allowed), [validationContext.MemberName!]);
     }
 }
 
@@ -73,12 +76,27 @@ public sealed class IpAddressTextAttribute : SettingAttribute
 }
 
 /// <summary>One of the names of an enumeration.</summary>
+/// <param name="names">The enumeration.</param>
 [AttributeUsage(AttributeTargets.Property)]
-public sealed class KnownNameAttribute : SettingAttribute
+public sealed class KnownNameAttribute(Type names) : SettingAttribute
 {
-    /// <inheritdoc/>
-    public override string Allowed => "one of the documented names";
+    /// <summary>The enumeration.</summary>
+    public Type Names { get; } = names;
 
     /// <inheritdoc/>
-    public override bool IsValid(object? value) => value is Enum name && Enum.IsDefined(name.GetType(), name);
+    public override string Allowed => string.Join(", ", Enum.GetNames(Names));
+
+    /// <inheritdoc/>
+    public override bool IsValid(object? value) => value is not null && Enum.IsDefined(Names, value);
+}
+
+/// <summary>Yes, no or unset.</summary>
+[AttributeUsage(AttributeTargets.Property)]
+public sealed class OptionalSwitchAttribute : SettingAttribute
+{
+    /// <inheritdoc/>
+    public override string Allowed => "true, false or unset";
+
+    /// <inheritdoc/>
+    public override bool IsValid(object? value) => value is null or bool;
 }

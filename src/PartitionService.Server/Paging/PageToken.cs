@@ -1,3 +1,4 @@
+using System.Buffers;
 using System.Buffers.Binary;
 using System.Buffers.Text;
 using System.Security.Cryptography;
@@ -35,7 +36,7 @@ internal static class PageToken
     {
         offset = 0;
         var bytes = new byte[Length];
-        if (token.Length > 2 * Length || !Base64Url.TryDecodeFromChars(token, bytes, out var written) || written != Length)
+        if (Base64Url.DecodeFromChars(token, bytes, out _, out var written) != OperationStatus.Done || written != Length)
             return false;
         offset = BinaryPrimitives.ReadInt32BigEndian(bytes.AsSpan(16));
         return offset > 0 && string.Equals(token, Write(catalogueDigest, list, offset), StringComparison.Ordinal);

@@ -15,7 +15,7 @@ internal sealed class Pager(ThermochemicalCatalogue catalogue)
 
     /// <summary>Checks a page size.</summary>
     public static void CheckSize(int pageSize, ICollection<CaseViolation> violations) =>
-        FieldChecks.Range(violations, "page_size", pageSize, 0, MaximumSize, "");
+        FieldChecks.Range(violations, "page_size", pageSize, 0, MaximumSize);
 
     /// <summary>Takes the page that a token names.</summary>
     /// <param name="all">All entries, in an order that the catalogue fixes.</param>

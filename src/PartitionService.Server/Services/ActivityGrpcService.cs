@@ -66,18 +66,18 @@ internal sealed class ActivityGrpcService(ThermochemicalCatalogue catalogue) : A
         FieldChecks.OneOf(violations, "solvent", request.Solvent, elements, "the symbol of an element of the catalogue");
         FieldChecks.OneOf(violations, "solute", request.Solute, elements, "the symbol of an element of the catalogue");
         if (request.Solute.Length > 0 && request.Solute == request.Solvent)
-            violations.Add(new CaseViolation("solute", request.Solute, "allowed is an element other than the solvent"));
+            violations.Add(new CaseViolation("solute", request.Solute, "must be an element other than the solvent"));
         FieldChecks.Temperature(violations, request.TemperatureKelvin);
         CheckState(violations, "from", request.From);
         CheckState(violations, "to", request.To);
         if (!(request.Activity > 0 && request.Activity <= LargestActivity))
         {
             violations.Add(new CaseViolation(
-                "activity", request.Activity.ToString("R", CultureInfo.InvariantCulture), "allowed is (0, 1e30]"));
+                "activity", request.Activity.ToString("R", CultureInfo.InvariantCulture), "must be a number in (0, 1e30]"));
         }
 
         if (request.HasLnGamma0)
-            FieldChecks.Range(violations, "ln_gamma0", request.LnGamma0, -LargestLnGamma, LargestLnGamma, "");
+            FieldChecks.Range(violations, "ln_gamma0", request.LnGamma0, -LargestLnGamma, LargestLnGamma);
         return violations;
     }
 
@@ -86,6 +86,6 @@ internal sealed class ActivityGrpcService(ThermochemicalCatalogue catalogue) : A
         if (state == ReferenceState.Unspecified)
             violations.Add(new CaseViolation(field, "", "required: a reference state"));
         else if (!Enum.IsDefined(state))
-            violations.Add(new CaseViolation(field, ((int)state).ToString(CultureInfo.InvariantCulture), "allowed is a value of ReferenceState"));
+            violations.Add(new CaseViolation(field, ((int)state).ToString(CultureInfo.InvariantCulture), "must be a value of ReferenceState"));
     }
 }

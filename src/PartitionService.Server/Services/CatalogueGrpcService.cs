@@ -83,7 +83,7 @@ internal sealed class CatalogueGrpcService(ThermochemicalCatalogue catalogue) : 
         Check(request.PageSize, temperature, violations =>
         {
             if (!Enum.IsDefined(request.Kind))
-                violations.Add(new CaseViolation("kind", Text((int)request.Kind), "allowed is a value of DatumKind"));
+                violations.Add(new CaseViolation("kind", Text((int)request.Kind), "must be a value of DatumKind"));
             FieldChecks.Length(violations, "slot_prefix", request.SlotPrefix, MaximumSlotLength);
             if (request.Element.Length > 0)
                 FieldChecks.OneOf(violations, "element", request.Element, [.. catalogue.Elements.Keys], "the symbol of an element of the catalogue");
