@@ -29,11 +29,14 @@ internal static class FailureReport
             OutputFileException wrong => (ExitCode.WrongInput, [wrong.Message]),
             RefusedCaseException refused => (ExitCode.InvalidCase, ["The service refuses the case:", .. refused.Lines]),
             InvalidCaseException invalid => (ExitCode.InvalidCase, ["The service refuses the request:", .. Violations(invalid)]),
-            UnsolvableCaseException unsolvable => (ExitCode.CannotHold, ["The case cannot hold: " + unsolvable.Message, .. Elements(unsolvable)]),
+            UnsolvableCaseException unsolvable =>
+                (ExitCode.CannotHold, ["The case cannot hold: " + unsolvable.Message, .. Elements(unsolvable)]),
             UnknownDatumException unknown => (ExitCode.UnknownDatum, [unknown.Message]),
             PartitionUnavailableException unreachable => (ExitCode.Unavailable, ["The service cannot be reached: " + unreachable.Message]),
-            PartitionTimeoutException late => (ExitCode.OutOfTime, ["No answer in time: " + late.Message, "Add --timeout with more seconds."]),
-            PartitionException other => (ExitCode.Unexpected, [$"The service failed ({other.StatusCode}, {other.Reason}): {other.Message}"]),
+            PartitionTimeoutException late =>
+                (ExitCode.OutOfTime, ["No answer in time: " + late.Message, "Add --timeout with more seconds."]),
+            PartitionException other =>
+                (ExitCode.Unexpected, [$"The service failed ({other.StatusCode}, {other.Reason}): {other.Message}"]),
             _ => (ExitCode.Unexpected, [$"Unexpected fault, please report it with the case: {fault.GetType().Name}: {fault.Message}"]),
         };
 

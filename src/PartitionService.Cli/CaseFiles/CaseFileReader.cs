@@ -4,7 +4,9 @@ using PartitionService.Contracts.V1;
 namespace PartitionService.Cli.CaseFiles;
 
 /// <summary>Reads a case from YAML, strictly: a key that is not understood is an error, never ignored.</summary>
-/// <remarks>Only the shape is checked here. Ranges belong to the service, whose refusals are put back to lines by <see cref="FieldPlaces"/>.</remarks>
+/// <remarks>
+/// Only the shape is checked here. Ranges belong to the service, whose refusals <see cref="FieldPlaces"/> puts back to lines.
+/// </remarks>
 internal static class CaseFileReader
 {
     /// <summary>Largest file, bytes.</summary>
@@ -12,6 +14,15 @@ internal static class CaseFileReader
 
     /// <summary>Absolute zero on the other scale: 0 degC in kelvin.</summary>
     internal const double KelvinAtZeroCelsius = 273.15;
+
+    private static readonly string[] RootKeys =
+    [
+        "name", "temperature_kelvin", "temperature_celsius", "pressure_atm", "charge", "metal", "slag", "gas", "oxygen", "allowances",
+        "overrides",
+    ];
+
+    private static readonly string[] AllowanceKeys =
+        ["metal_in_slag", "slag_in_metal_mass_percent", "mechanical_dust_mass_fraction", "stage_efficiencies"];
 
     private static readonly string[] OxygenKeys =
     [
@@ -61,9 +72,7 @@ internal static class CaseFileReader
         var vesselCase = new VesselCase();
         try
         {
-            var root = Section.Open(
-                CaseTreeReader.Read(text), "", FieldPlaces.Root, errors, places,
-                "name", "temperature_kelvin", "temperature_celsius", "pressure_atm", "charge", "metal", "slag", "gas", "oxygen", "allowances", "overrides");
+            var root = Section.Open(CaseTreeReader.Read(text), "", FieldPlaces.Root, errors, places, RootKeys);
             if (root is not null)
                 Fill(vesselCase, root);
         }
@@ -109,7 +118,7 @@ internal static class CaseFileReader
             vesselCase.Gas = new GasAtmosphere();
         root.Require("oxygen");
         vesselCase.Oxygen = ReadOxygen(root);
-        if (root.Inner("allowances", "metal_in_slag", "slag_in_metal_mass_percent", "mechanical_dust_mass_fraction", "stage_efficiencies") is { } allowances)
+        if (root.Inner("allowances", AllowanceKeys) is { } allowances)
             vesselCase.Allowances = ReadAllowances(allowances);
         foreach (var item in root.Items("overrides", "slot", "ln_gamma", "gibbs_energy_joule_per_mol", "epsilon", "source"))
             vesselCase.Overrides.Add(ReadOverride(item));

@@ -39,7 +39,11 @@ internal sealed class CaseTreeReader
         var root = ReadNode(1);
         parser.Consume<DocumentEnd>();
         if (parser.Accept<DocumentStart>(out var second))
-            throw new CaseTreeException((int)second.Start.Line, (int)second.Start.Column, "A file holds one case; a second document starts here.");
+        {
+            throw new CaseTreeException(
+                (int)second.Start.Line, (int)second.Start.Column, "A file holds one case; a second document starts here.");
+        }
+
         return root;
     }
 

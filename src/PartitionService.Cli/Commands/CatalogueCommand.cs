@@ -1,5 +1,4 @@
 using System.CommandLine;
-using PartitionService.Cli.Hosting;
 using PartitionService.Cli.Output;
 using PartitionService.Client;
 using PartitionService.Contracts.V1;
@@ -21,24 +20,33 @@ internal static class CatalogueCommand
     private static Command Solvents(Terminal terminal)
     {
         var command = new Command("solvents", "Lists the liquid metals that may be a solvent.");
-        Listed(command, terminal, async (_, client, stop) => CatalogueListings.OfSolvents(await client.ListSolventsAsync(stop).ToListAsync(stop).ConfigureAwait(false)));
+        Listed(command, terminal, async (_, client, stop) =>
+            CatalogueListings.OfSolvents(await client.ListSolventsAsync(stop).ToListAsync(stop).ConfigureAwait(false)));
         return command;
     }
 
     private static Command Solutes(Terminal terminal)
     {
-        var solvent = new Argument<string?>("SOLVENT") { Description = "Element symbol of the solvent. Unset: all solvents.", Arity = ArgumentArity.ZeroOrOne };
+        var solvent = new Argument<string?>("SOLVENT")
+        {
+            Description = "Element symbol of the solvent. Unset: all solvents.",
+            Arity = ArgumentArity.ZeroOrOne,
+        };
         var temperature = CommonOptions.Temperature();
         var command = new Command("solutes", "Lists the solutes of a solvent with ln gamma0.") { solvent, temperature };
-        Listed(command, terminal, async (parsed, client, stop) => CatalogueListings.OfSolutes(
-            await client.ListSolutesAsync(parsed.GetValue(solvent), parsed.GetValue(temperature), stop).ToListAsync(stop).ConfigureAwait(false)));
+        Listed(command, terminal, async (parsed, client, stop) =>
+        {
+            var solutes = client.ListSolutesAsync(parsed.GetValue(solvent), parsed.GetValue(temperature), stop);
+            return CatalogueListings.OfSolutes(await solutes.ToListAsync(stop).ConfigureAwait(false));
+        });
         return command;
     }
 
     private static Command Slags(Terminal terminal)
     {
         var command = new Command("slags", "Lists the slag families with their usual composition and the oxides that they know.");
-        Listed(command, terminal, async (_, client, stop) => CatalogueListings.OfSlags(await client.ListSlagFamiliesAsync(stop).ToListAsync(stop).ConfigureAwait(false)));
+        Listed(command, terminal, async (_, client, stop) =>
+            CatalogueListings.OfSlags(await client.ListSlagFamiliesAsync(stop).ToListAsync(stop).ConfigureAwait(false)));
         return command;
     }
 
@@ -47,7 +55,11 @@ internal static class CatalogueCommand
         var kinds = Enum.GetValues<DatumKind>().Where(kind => kind != DatumKind.Unspecified).ToDictionary(Words.Hyphenated);
         var kind = new Option<string?>("--kind") { Description = "Only rows of this kind." };
         kind.AcceptOnlyFromAmong([.. kinds.Keys]);
-        var slot = new Option<string?>("--slot") { Description = "Only rows whose slot starts with this text, for example metal/Cu/.", HelpName = "TEXT" };
+        var slot = new Option<string?>("--slot")
+        {
+            Description = "Only rows whose slot starts with this text, for example metal/Cu/.",
+            HelpName = "TEXT",
+        };
         var element = new Option<string?>("--element") { Description = "Only rows about this element.", HelpName = "ELEMENT" };
         var all = new Option<bool>("--competing") { Description = "Also the rows that do not count." };
         var temperature = CommonOptions.Temperature();
@@ -78,19 +90,18 @@ internal static class CatalogueCommand
         return command;
     }
 
-    private static void Listed(Command command, Terminal terminal, Func<ParseResult, PartitionClient, CancellationToken, Task<Listing>> list)
+    private static void Listed(
+        Command command, Terminal terminal, Func<ParseResult, PartitionClient, CancellationToken, Task<Listing>> list)
     {
-        var (address, timeout, format, output) = (CommonOptions.Address(), CommonOptions.Timeout(), CommonOptions.Format(), CommonOptions.Output());
-        foreach (var option in (Option[])[address, timeout, format, output])
-            command.Add(option);
+        var service = new ServiceOptions();
+        service.AddTo(command);
         command.SetAction(async (parsed, cancellation) =>
         {
-            var connection = await ServiceConnection
-                .OpenAsync(parsed.GetValue(address), TimeSpan.FromSeconds(parsed.GetValue(timeout)), cancellation).ConfigureAwait(false);
+            var connection = await service.OpenAsync(parsed, cancellation).ConfigureAwait(false);
             await using var _ = connection.ConfigureAwait(false);
             var listing = await list(parsed, connection.Client, cancellation).ConfigureAwait(false);
-            var text = ListingText.Render(listing, parsed.GetRequiredValue(format), terminal, parsed.GetValue(output));
-            await OutputFile.WriteAsync(text, parsed.GetValue(output), terminal, cancellation).ConfigureAwait(false);
+            var text = ListingText.Render(listing, service.FormatOf(parsed), terminal, service.FileOf(parsed));
+            await OutputFile.WriteAsync(text, service.FileOf(parsed), terminal, cancellation).ConfigureAwait(false);
             return ExitCode.Success;
         });
     }

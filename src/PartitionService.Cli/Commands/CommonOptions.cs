@@ -15,7 +15,8 @@ internal static class CommonOptions
     /// <returns>An option; unset: a service inside this process.</returns>
     public static Option<Uri?> Address() => new("--address")
     {
-        Description = "Address of a running service, for example http://localhost:5080. Unset: the service runs inside this process, on loopback only.",
+        Description = "Address of a running service, for example http://localhost:5080. "
+            + "Unset: the service runs inside this process, on loopback only.",
         HelpName = "URL",
         CustomParser = result =>
         {
@@ -34,7 +35,7 @@ internal static class CommonOptions
         Description = "Longest wait for an answer in seconds, above 0 and at most 3600.",
         HelpName = "SECONDS",
         DefaultValueFactory = _ => 30,
-        CustomParser = result => Number(result, seconds => seconds > 0 && seconds <= PartitionClientOptions.LongestDeadline.TotalSeconds, "must be above 0 and at most 3600"),
+        CustomParser = result => Number(result, IsDeadline, "must be above 0 and at most 3600"),
     };
 
     /// <summary>Form of the result.</summary>
@@ -43,7 +44,8 @@ internal static class CommonOptions
     {
         var option = new Option<string>("--format")
         {
-            Description = "table: a page for reading; csv: one number per record; json: the message of the contract in the proto3 JSON mapping.",
+            Description = "table: a page for reading; csv: one number per record; "
+                + "json: the message of the contract in the proto3 JSON mapping.",
             DefaultValueFactory = _ => "table",
         };
         option.AcceptOnlyFromAmong([.. Formats]);
@@ -82,4 +84,6 @@ internal static class CommonOptions
             result.AddError($"{option}: {text} is out of range; it {limit}.");
         return value;
     }
+
+    private static bool IsDeadline(double seconds) => seconds > 0 && seconds <= PartitionClientOptions.LongestDeadline.TotalSeconds;
 }

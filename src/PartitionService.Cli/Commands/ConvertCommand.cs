@@ -1,5 +1,4 @@
 using System.CommandLine;
-using PartitionService.Cli.Hosting;
 using PartitionService.Cli.Output;
 using PartitionService.Contracts.V1;
 
@@ -20,8 +19,8 @@ internal static class ConvertCommand
     /// <returns>The command.</returns>
     public static Command Create(Terminal terminal)
     {
-        var solvent = new Option<string>("--solvent") { Description = "Element symbol of the liquid metal.", Required = true, HelpName = "ELEMENT" };
-        var solute = new Option<string>("--solute") { Description = "Element symbol of the dissolved element.", Required = true, HelpName = "ELEMENT" };
+        var solvent = Symbol("--solvent", "Element symbol of the liquid metal.");
+        var solute = Symbol("--solute", "Element symbol of the dissolved element.");
         var temperature = RequiredNumber("--temperature", "Temperature in kelvin, from 500 to 2500.", "KELVIN");
         var activity = RequiredNumber("--activity", "Activity in the reference state --from, above 0.", "NUMBER");
         var from = State("--from", "Reference state of the activity.");
@@ -32,11 +31,12 @@ internal static class ConvertCommand
             HelpName = "NUMBER",
             CustomParser = result => CommonOptions.Number(result, _ => true, ""),
         };
-        var (address, timeout, format, output) = (CommonOptions.Address(), CommonOptions.Timeout(), CommonOptions.Format(), CommonOptions.Output());
+        var service = new ServiceOptions();
         var command = new Command("convert", "Converts the activity of a dilute solute between reference states.")
         {
-            solvent, solute, temperature, activity, from, to, lnGamma0, address, timeout, format, output,
+            solvent, solute, temperature, activity, from, to, lnGamma0,
         };
+        service.AddTo(command);
         command.SetAction(async (parsed, cancellation) =>
         {
             var request = new ConvertActivityCoefficientRequest
@@ -50,16 +50,19 @@ internal static class ConvertCommand
             };
             if (parsed.GetValue(lnGamma0) is { } given)
                 request.LnGamma0 = given;
-            var connection = await ServiceConnection
-                .OpenAsync(parsed.GetValue(address), TimeSpan.FromSeconds(parsed.GetValue(timeout)), cancellation).ConfigureAwait(false);
+            var connection = await service.OpenAsync(parsed, cancellation).ConfigureAwait(false);
             await using var _ = connection.ConfigureAwait(false);
             var response = await connection.Client.ConvertActivityCoefficientAsync(request, cancellation).ConfigureAwait(false);
-            var text = ListingText.Render(ConversionListing.Of(request, response), parsed.GetRequiredValue(format), terminal, parsed.GetValue(output));
-            await OutputFile.WriteAsync(text, parsed.GetValue(output), terminal, cancellation).ConfigureAwait(false);
+            var listing = ConversionListing.Of(request, response);
+            var text = ListingText.Render(listing, service.FormatOf(parsed), terminal, service.FileOf(parsed));
+            await OutputFile.WriteAsync(text, service.FileOf(parsed), terminal, cancellation).ConfigureAwait(false);
             return ExitCode.Success;
         });
         return command;
     }
+
+    private static Option<string> Symbol(string name, string description) =>
+        new(name) { Description = description, Required = true, HelpName = "ELEMENT" };
 
     private static Option<double> RequiredNumber(string name, string description, string helpName) => new(name)
     {

@@ -16,24 +16,27 @@ internal static class SolveCommand
     public static Command Create(Terminal terminal)
     {
         var file = new Argument<string>("FILE") { Description = "Case file, YAML. The command \"starter\" writes one with explanations." };
-        var (address, timeout, format, output) = (CommonOptions.Address(), CommonOptions.Timeout(), CommonOptions.Format(), CommonOptions.Output());
-        var data = new Option<bool>("--data") { Description = "With a table: list every datum that entered the answer, with its sigma and source." };
+        var service = new ServiceOptions();
+        var data = new Option<bool>("--data")
+        {
+            Description = "With a table: list every datum that entered the answer, with its sigma and source.",
+        };
         var command = new Command("solve", "Solves the vessel of a case file. The exit status is explained by: partition --help")
         {
-            file, address, timeout, format, output, data,
+            file, data,
         };
+        service.AddTo(command);
         command.SetAction(async (parsed, cancellation) =>
         {
             // The file is read first: a wrong file must not cost the start of a service.
             var caseFile = await CaseFileReader.ReadFileAsync(parsed.GetRequiredValue(file), cancellation).ConfigureAwait(false);
-            var connection = await ServiceConnection
-                .OpenAsync(parsed.GetValue(address), TimeSpan.FromSeconds(parsed.GetValue(timeout)), cancellation).ConfigureAwait(false);
+            var connection = await service.OpenAsync(parsed, cancellation).ConfigureAwait(false);
             await using var _ = connection.ConfigureAwait(false);
             var answer = await SolveAsync(connection, caseFile, cancellation).ConfigureAwait(false);
             // A file is laid out like a pipe: its reader's width is not the terminal's.
-            var page = Page.For(terminal.IsTerminal && parsed.GetValue(output) is null, parsed.GetValue(data));
-            var text = Render(answer, parsed.GetRequiredValue(format), page);
-            await OutputFile.WriteAsync(text, parsed.GetValue(output), terminal, cancellation).ConfigureAwait(false);
+            var page = Page.For(terminal.IsTerminal && service.FileOf(parsed) is null, parsed.GetValue(data));
+            var text = Render(answer, service.FormatOf(parsed), page);
+            await OutputFile.WriteAsync(text, service.FileOf(parsed), terminal, cancellation).ConfigureAwait(false);
             return ExitCode.Success;
         });
         return command;

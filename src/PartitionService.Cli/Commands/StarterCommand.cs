@@ -12,7 +12,11 @@ internal static class StarterCommand
     /// <returns>The command.</returns>
     public static Command Create(Terminal terminal)
     {
-        var file = new Argument<string>("FILE") { Description = "File to write, or - for standard output.", DefaultValueFactory = _ => DefaultFile };
+        var file = new Argument<string>("FILE")
+        {
+            Description = "File to write, or - for standard output.",
+            DefaultValueFactory = _ => DefaultFile,
+        };
         var replace = new Option<bool>("--replace") { Description = "Replace the file where it exists." };
         var command = new Command("starter", "Writes a case file with explanations to start from.") { file, replace };
         command.SetAction(async (parsed, cancellation) =>
@@ -28,7 +32,8 @@ internal static class StarterCommand
             if (!parsed.GetValue(replace) && (File.Exists(path) || Directory.Exists(path)))
                 throw new OutputFileException($"{path}: The file exists and was left as it is. Name another, or add --replace.");
             await OutputFile.WriteAsync(text, path, terminal, cancellation).ConfigureAwait(false);
-            await terminal.Output.WriteLineAsync($"Wrote {path}. Next: partition solve {path}".AsMemory(), cancellation).ConfigureAwait(false);
+            var next = $"Wrote {path}. Next: partition solve {path}";
+            await terminal.Output.WriteLineAsync(next.AsMemory(), cancellation).ConfigureAwait(false);
             return ExitCode.Success;
         });
         return command;

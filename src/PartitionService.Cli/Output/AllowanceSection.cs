@@ -17,16 +17,20 @@ internal static class AllowanceSection
         if (on.MetalInSlagMassPercent != 0)
         {
             var origin = on.MetalInSlagSlot.Length > 0 ? $", typical value {on.MetalInSlagSlot}" : "";
-            facts.Add($"{NumberText.Significant(on.MetalInSlagMassPercent)} % metal droplets in the slag ({NumberText.Quantity(on.MetalInSlagKg)} kg{origin})");
+            var mass = NumberText.Quantity(on.MetalInSlagKg);
+            facts.Add($"{NumberText.Significant(on.MetalInSlagMassPercent)} % metal droplets in the slag ({mass} kg{origin})");
         }
 
         if (on.SlagInMetalMassPercent != 0)
             facts.Add($"{NumberText.Significant(on.SlagInMetalMassPercent)} % slag in the metal ({NumberText.Quantity(on.SlagInMetalKg)} kg)");
         if (on.MechanicalDustMassFraction != 0)
             facts.Add($"{NumberText.Significant(100 * on.MechanicalDustMassFraction)} % of the solid charge as mechanical dust");
-        facts.AddRange(on.StageEfficiencies.Select(stage =>
-            $"{NumberText.Significant(100 * stage.Efficiency)} % of {stage.Element} reaches equilibrium ({NumberText.Quantity(stage.BypassedKg)} kg pass by)"));
+        facts.AddRange(on.StageEfficiencies.Select(Describe));
         if (facts.Count > 0)
             PlainText.WriteLabelled(output, "Allowances", AnswerTable.LabelWidth, string.Join("; ", facts), page.Width);
     }
+
+    private static string Describe(AppliedStageEfficiency stage) =>
+        $"{NumberText.Significant(100 * stage.Efficiency)} % of {stage.Element} reaches equilibrium "
+            + $"({NumberText.Quantity(stage.BypassedKg)} kg pass by)";
 }

@@ -20,7 +20,11 @@ internal static class AnswerCsv
     {
         Csv.WriteRecord(output, Header);
         foreach (var record in Records(answer))
-            Csv.WriteRecord(output, answer.Name, record.Section, record.Subject, record.Quantity, Csv.Number(record.Value), record.Unit, record.Text);
+        {
+            var value = Csv.Number(record.Value);
+            Csv.WriteRecord(output, answer.Name, record.Section, record.Subject, record.Quantity, value, record.Unit, record.Text);
+        }
+
     }
 
     private static IEnumerable<CsvEntry> Records(ChargeAnswer answer) =>
@@ -36,8 +40,8 @@ internal static class AnswerCsv
         .. MessageEntries.Of("solvent_loss", answer.Solvent, answer.SolventLoss),
         .. MessageEntries.Of("allowance", "", answer.Allowances),
         .. (answer.Allowances?.StageEfficiencies ?? []).SelectMany(stage => MessageEntries.Of("allowance", stage.Element, stage)),
-        .. answer.Remarks.Select(remark => new CsvEntry("remark", remark.Element.Length > 0 ? remark.Element : remark.Subject, Words.Hyphenated(remark.Code), null, "", $"{Words.Of(remark.Severity)}: {remark.Text}")),
-        .. answer.Cautions.Select(caution => new CsvEntry("caution", caution.Substance, "load_gram_per_normal_cubic_metre", caution.HasLoadGramPerNormalCubicMetre ? caution.LoadGramPerNormalCubicMetre : null, "g/Nm3", caution.Text)),
+        .. answer.Remarks.Select(Entry),
+        .. answer.Cautions.Select(Entry),
         .. answer.DataUsed.SelectMany(Datum),
     ];
 
@@ -48,9 +52,22 @@ internal static class AnswerCsv
         .. (phase?.Species ?? []).SelectMany(species => MessageEntries.Of($"{section}_species", species.Species, species)),
     ];
 
+    private static CsvEntry Entry(Remark remark)
+    {
+        var subject = remark.Element.Length > 0 ? remark.Element : remark.Subject;
+        return new CsvEntry("remark", subject, Words.Hyphenated(remark.Code), null, "", $"{Words.Of(remark.Severity)}: {remark.Text}");
+    }
+
+    private static CsvEntry Entry(Caution caution)
+    {
+        double? load = caution.HasLoadGramPerNormalCubicMetre ? caution.LoadGramPerNormalCubicMetre : null;
+        return new CsvEntry("caution", caution.Substance, "load_gram_per_normal_cubic_metre", load, "g/Nm3", caution.Text);
+    }
+
     private static IEnumerable<CsvEntry> Datum(DatumUse datum)
     {
-        var origin = string.Join("; ", [datum.Quantity, datum.Overridden ? "given by the case" : Words.Of(datum.Access), .. datum.SourceIds, .. datum.Flags]);
+        var access = datum.Overridden ? "given by the case" : Words.Of(datum.Access);
+        var origin = string.Join("; ", [datum.Quantity, access, .. datum.SourceIds, .. datum.Flags]);
         yield return new CsvEntry("datum", datum.Key, "value", datum.Value, datum.Unit, origin);
         if (datum.HasSigma)
             yield return new CsvEntry("datum", datum.Key, "sigma", datum.Sigma, datum.Unit, "");

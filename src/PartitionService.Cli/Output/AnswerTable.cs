@@ -32,7 +32,7 @@ internal static class AnswerTable
     {
         PlainText.WriteLabelled(output, "", 0, answer.Name.Length > 0 ? answer.Name : "Case without a name", page.Width);
         var celsius = NumberText.Fixed(answer.TemperatureKelvin - KelvinAtZeroCelsius, 0);
-        var digest = answer.CatalogueDigest.Length > ShownDigestDigits ? answer.CatalogueDigest[..ShownDigestDigits] : answer.CatalogueDigest;
+        var digest = answer.CatalogueDigest[..Math.Min(ShownDigestDigits, answer.CatalogueDigest.Length)];
         string[] facts =
         [
             $"{NumberText.Fixed(answer.TemperatureKelvin, 2)} K ({celsius} degC), {NumberText.Significant(answer.PressureAtm)} atm",

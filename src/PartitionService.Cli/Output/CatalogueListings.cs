@@ -21,10 +21,15 @@ internal static class CatalogueListings
     /// <param name="solvents">The solvents.</param>
     /// <returns>The listing.</returns>
     public static Listing OfSolvents(IReadOnlyList<Solvent> solvents) => new(
-        [new("", Alignment.Left), new("melts at, K", Alignment.Decimal), new("solutes", Alignment.Decimal), new("interactions", Alignment.Decimal)],
-        [.. solvents.Select(solvent => new[] { solvent.Element, NumberText.Fixed(solvent.MeltingPointKelvin, 1), Count(solvent.SoluteCount), Count(solvent.InteractionCount) })],
+        [
+            new("", Alignment.Left),
+            new("melts at, K", Alignment.Decimal),
+            new("solutes", Alignment.Decimal),
+            new("interactions", Alignment.Decimal),
+        ],
+        [.. solvents.Select(solvent => Row(solvent, NumberText.Fixed(solvent.MeltingPointKelvin, 1)))],
         ["element", "melting_point_kelvin", "solute_count", "interaction_count"],
-        [.. solvents.Select(solvent => new[] { solvent.Element, Csv.Number(solvent.MeltingPointKelvin), Count(solvent.SoluteCount), Count(solvent.InteractionCount) })],
+        [.. solvents.Select(solvent => Row(solvent, Csv.Number(solvent.MeltingPointKelvin)))],
         new ListSolventsResponse { Solvents = { solvents }, TotalSize = solvents.Count });
 
     /// <summary>Lays out solutes.</summary>
@@ -32,19 +37,42 @@ internal static class CatalogueListings
     /// <returns>The listing.</returns>
     public static Listing OfSolutes(IReadOnlyList<Solute> solutes) => new(
         [
-            new("in", Alignment.Left), new("solute", Alignment.Left), new("ln gamma0", Alignment.Decimal), new("sigma", Alignment.Decimal), new("at K", Alignment.Decimal),
-            new("range, K", Alignment.Left), new("activity 1 is", Alignment.Left), new("how obtained", Alignment.Left),
+            new("in", Alignment.Left),
+            new("solute", Alignment.Left),
+            new("ln gamma0", Alignment.Decimal),
+            new("sigma", Alignment.Decimal),
+            new("at K", Alignment.Decimal),
+            new("range, K", Alignment.Left),
+            new("activity 1 is", Alignment.Left),
+            new("how obtained", Alignment.Left),
         ],
         [.. solutes.Select(solute => new[]
         {
-            solute.Solvent, solute.Element, NumberText.Significant(solute.LnGamma0), NumberText.Significant(solute.SigmaLnGamma), NumberText.Fixed(solute.TemperatureKelvin, 0),
-            Range(solute.MinimumTemperatureKelvin, solute.MaximumTemperatureKelvin), solute.StandardState, Words.Of(solute.Access),
+            solute.Solvent,
+            solute.Element,
+            NumberText.Significant(solute.LnGamma0),
+            NumberText.Significant(solute.SigmaLnGamma),
+            NumberText.Fixed(solute.TemperatureKelvin, 0),
+            Range(solute.MinimumTemperatureKelvin, solute.MaximumTemperatureKelvin),
+            solute.StandardState,
+            Words.Of(solute.Access),
         })],
-        ["solvent", "element", "ln_gamma0", "sigma_ln_gamma", "temperature_kelvin", "minimum_temperature_kelvin", "maximum_temperature_kelvin", "standard_state", "access", "key"],
+        [
+            "solvent", "element", "ln_gamma0", "sigma_ln_gamma", "temperature_kelvin", "minimum_temperature_kelvin",
+            "maximum_temperature_kelvin", "standard_state", "access", "key",
+        ],
         [.. solutes.Select(solute => new[]
         {
-            solute.Solvent, solute.Element, Csv.Number(solute.LnGamma0), Csv.Number(solute.SigmaLnGamma), Csv.Number(solute.TemperatureKelvin),
-            Csv.Number(solute.MinimumTemperatureKelvin), Csv.Number(solute.MaximumTemperatureKelvin), solute.StandardState, Words.Hyphenated(solute.Access), solute.Key,
+            solute.Solvent,
+            solute.Element,
+            Csv.Number(solute.LnGamma0),
+            Csv.Number(solute.SigmaLnGamma),
+            Csv.Number(solute.TemperatureKelvin),
+            Csv.Number(solute.MinimumTemperatureKelvin),
+            Csv.Number(solute.MaximumTemperatureKelvin),
+            solute.StandardState,
+            Words.Hyphenated(solute.Access),
+            solute.Key,
         })],
         new ListSolutesResponse { Solutes = { solutes }, TotalSize = solutes.Count });
 
@@ -52,13 +80,17 @@ internal static class CatalogueListings
     /// <param name="families">The families.</param>
     /// <returns>The listing.</returns>
     public static Listing OfSlags(IReadOnlyList<SlagFamily> families) => new(
-        [new("family", Alignment.Left), new("range, K", Alignment.Left), new("what it is, mass %, oxides and salts with data", Alignment.Left)],
+        [
+            new("family", Alignment.Left),
+            new("range, K", Alignment.Left),
+            new("what it is, mass %, oxides and salts with data", Alignment.Left),
+        ],
         [.. families.Select(family => new[]
         {
             family.Name,
             Range(family.MinimumTemperatureKelvin, family.MaximumTemperatureKelvin),
-            $"{family.Description} | {string.Join(", ", family.Components.Select(part => $"{part.Formula} {NumberText.Significant(part.LowMassPercent)}-{NumberText.Significant(part.HighMassPercent)}"))}"
-                + $" | {string.Join(' ', family.Oxides.Select(oxide => oxide.Oxide))}",
+            $"{family.Description} | {string.Join(", ", family.Components.Select(Window))} | "
+                + string.Join(' ', family.Oxides.Select(oxide => oxide.Oxide)),
         })],
         ["family", "oxide", "element", "sigma_ln_gamma", "access", "key"],
         [.. families.SelectMany(family => family.Oxides.Select(oxide => new[]
@@ -81,15 +113,26 @@ internal static class CatalogueListings
     /// <param name="explanation">The rows.</param>
     /// <returns>The listing.</returns>
     public static Listing OfExplanation(ExplainDatumResponse explanation) => new(
-        DatumColumns, [.. explanation.Data.Select(datum => ForReading(datum, isLong: true))], DatumCsv, [.. explanation.Data.Select(ForCsv)], explanation);
+        DatumColumns,
+        [.. explanation.Data.Select(datum => ForReading(datum, isLong: true))],
+        DatumCsv,
+        [.. explanation.Data.Select(ForCsv)],
+        explanation);
 
     private static string[] ForReading(CatalogueDatum datum, bool isLong)
     {
-        var words = new List<string> { datum.Description, datum.Formula, Words.Of(datum.Access), datum.Preferred ? "counts" : "does not count" };
+        var standing = datum.Preferred ? "counts" : "does not count";
+        var words = new List<string> { datum.Description, datum.Formula, Words.Of(datum.Access), standing };
         if (isLong)
-            words.AddRange([datum.PreferredReason, .. datum.Sources.Select(source => $"{source.Citation} {source.Locator}".Trim()), .. datum.Flags, datum.Note]);
+        {
+            var sources = datum.Sources.Select(source => $"{source.Citation} {source.Locator}".Trim());
+            words.AddRange([datum.PreferredReason, .. sources, .. datum.Flags, datum.Note]);
+        }
         else
+        {
             words.Add(string.Join(", ", datum.Sources.Select(source => source.Id)));
+        }
+
         return
         [
             datum.Key,
@@ -103,11 +146,30 @@ internal static class CatalogueListings
 
     private static string[] ForCsv(CatalogueDatum datum) =>
     [
-        datum.Key, datum.Slot, Words.Hyphenated(datum.Kind), datum.Description, datum.Formula, Csv.Number(datum.HasValue ? datum.Value : null), datum.Unit,
-        Csv.Number(datum.ValueTemperatureKelvin), Csv.Number(datum.HasSigma ? datum.Sigma : null), Csv.Number(datum.MinimumTemperatureKelvin),
-        Csv.Number(datum.MaximumTemperatureKelvin), datum.Preferred ? "true" : "false", datum.PreferredReason, Words.Hyphenated(datum.Access),
-        string.Join(';', datum.Sources.Select(source => source.Id)), string.Join(';', datum.Flags), datum.Note,
+        datum.Key,
+        datum.Slot,
+        Words.Hyphenated(datum.Kind),
+        datum.Description,
+        datum.Formula,
+        Csv.Number(datum.HasValue ? datum.Value : null),
+        datum.Unit,
+        Csv.Number(datum.ValueTemperatureKelvin),
+        Csv.Number(datum.HasSigma ? datum.Sigma : null),
+        Csv.Number(datum.MinimumTemperatureKelvin),
+        Csv.Number(datum.MaximumTemperatureKelvin),
+        datum.Preferred ? "true" : "false",
+        datum.PreferredReason,
+        Words.Hyphenated(datum.Access),
+        string.Join(';', datum.Sources.Select(source => source.Id)),
+        string.Join(';', datum.Flags),
+        datum.Note,
     ];
+
+    private static string[] Row(Solvent solvent, string meltingPoint) =>
+        [solvent.Element, meltingPoint, Count(solvent.SoluteCount), Count(solvent.InteractionCount)];
+
+    private static string Window(SlagComponent part) =>
+        $"{part.Formula} {NumberText.Significant(part.LowMassPercent)}-{NumberText.Significant(part.HighMassPercent)}";
 
     private static string Count(int count) => count.ToString(System.Globalization.CultureInfo.InvariantCulture);
 

@@ -23,9 +23,12 @@ internal static class ConversionListing
         var origin = response.DatumKey.Length > 0 ? $"{response.DatumKey}, {Words.Of(response.Access)}" : "given on the command line";
         return new Listing(
             [new("", Alignment.Left), new("value", Alignment.Decimal), new("unit", Alignment.Left)],
-            [.. rows.Select(row => new[] { row.Quantity, NumberText.Significant(row.Value, 5, 1e7), row.Unit == "1" ? "" : row.Unit }), ["source of ln gamma0", "", origin]],
+            [.. rows.Select(row => ForReading(row.Quantity, row.Value, row.Unit)), ["source of ln gamma0", "", origin]],
             ["quantity", "value", "unit", "text"],
             [.. rows.Select(row => new[] { row.Quantity, Csv.Number(row.Value), row.Unit, "" }), ["source of ln gamma0", "", "", origin]],
             response);
     }
+
+    private static string[] ForReading(string quantity, double value, string unit) =>
+        [quantity, NumberText.Significant(value, 5, 1e7), unit == "1" ? "" : unit];
 }

@@ -23,7 +23,11 @@ internal static class DataSection
             new TableColumn("unit", Alignment.Left),
             new TableColumn("what, how obtained, from where", Alignment.Left));
         foreach (var datum in answer.DataUsed)
-            table.Add(datum.Key, NumberText.Significant(datum.Value, 4), datum.HasSigma ? NumberText.Significant(datum.Sigma) : NumberText.None, datum.Unit, Describe(datum));
+        {
+            var sigma = datum.HasSigma ? NumberText.Significant(datum.Sigma) : NumberText.None;
+            table.Add(datum.Key, NumberText.Significant(datum.Value, 4), sigma, datum.Unit, Describe(datum));
+        }
+
         table.Write(output, page.Width);
     }
 
@@ -37,7 +41,8 @@ internal static class DataSection
         var how = isShown ? "" : " All of them: add --data.";
         return answer.DataUsed.Count == 0
             ? "no catalogue row entered the answer."
-            : FormattableString.Invariant($"{answer.DataUsed.Count} rows: {string.Join(", ", counts)}; weakest: {Words.Of(answer.WeakestAccess)}.{how}");
+            : FormattableString.Invariant($"{answer.DataUsed.Count} rows: {string.Join(", ", counts)}; ")
+                + $"weakest: {Words.Of(answer.WeakestAccess)}.{how}";
     }
 
     private static string Describe(DatumUse datum)

@@ -18,11 +18,13 @@ internal static class ElementSection
         var table = tables.FirstOrDefault(candidate => candidate.Measure() <= page.Width) ?? tables[^1];
         output.WriteLine("Where each element goes, % of what is charged");
         table.Write(output, page.Width);
-        PlainText.WriteLabelled(output, "", 0, $"{page.Bar.Legend}; L = mass % in slag / mass % in metal at equilibrium, without allowances", page.Width);
+        var legend = $"{page.Bar.Legend}; L = mass % in slag / mass % in metal at equilibrium, without allowances";
+        PlainText.WriteLabelled(output, "", 0, legend, page.Width);
         foreach (var element in answer.Elements.Where(element => element.UnplacedFraction != 0))
         {
             var share = NumberText.Percent(element.UnplacedFraction);
-            PlainText.WriteLabelled(output, "", 0, $"{element.Element}: {share} % cannot be placed, the catalogue lacks the data.", page.Width);
+            var text = $"{element.Element}: {share} % cannot be placed, the catalogue lacks the data.";
+            PlainText.WriteLabelled(output, "", 0, text, page.Width);
         }
     }
 

@@ -29,15 +29,17 @@ internal static class PhaseSection
 
     private static string Condensed(PhaseReport phase, string introduction)
     {
-        var main = phase.Species.Take(MainSpecies).Select(species => $"{species.Species} {NumberText.Significant(species.MoleFraction)}").ToArray();
+        var main = phase.Species.Take(MainSpecies)
+            .Select(species => $"{species.Species} {NumberText.Significant(species.MoleFraction)}").ToArray();
         return $"{NumberText.Quantity(phase.MassKg)} kg" + (main.Length > 0 ? introduction + string.Join(", ", main) : "");
     }
 
     private static string Describe(GasReport gas)
     {
         var main = gas.Species.Take(MainSpecies).Select(species => $"{species.Species} {NumberText.Percent(species.VolumeFraction)} %");
-        return $"{NumberText.Quantity(gas.VolumeNormalCubicMetre)} Nm3, {NumberText.Quantity(gas.MassKg)} kg; by volume {string.Join(", ", main)}; "
-            + $"{NumberText.Significant(gas.DustFormingLoadGramPerNormalCubicMetre)} g/Nm3 of elements that turn into fume and dust on cooling";
+        var load = NumberText.Significant(gas.DustFormingLoadGramPerNormalCubicMetre);
+        return $"{NumberText.Quantity(gas.VolumeNormalCubicMetre)} Nm3, {NumberText.Quantity(gas.MassKg)} kg; "
+            + $"by volume {string.Join(", ", main)}; {load} g/Nm3 of elements that turn into fume and dust on cooling";
     }
 
     private static string Describe(SolventLoss loss, string solvent)
@@ -48,6 +50,7 @@ internal static class PhaseSection
             (loss.GasKg, "in the gas"), (loss.MechanicalDustKg, "in mechanical dust"),
         ];
         var lost = parts.Where(part => part.Kg != 0).Select(part => $"{NumberText.Quantity(part.Kg)} kg {part.Where}");
-        return $"{NumberText.Percent(loss.LossFraction)} % of {NumberText.Quantity(loss.InputKg)} kg {solvent}: {string.Join(", ", lost.DefaultIfEmpty("nothing"))}";
+        return $"{NumberText.Percent(loss.LossFraction)} % of {NumberText.Quantity(loss.InputKg)} kg {solvent}: "
+            + string.Join(", ", lost.DefaultIfEmpty("nothing"));
     }
 }

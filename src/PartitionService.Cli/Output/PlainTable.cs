@@ -62,7 +62,7 @@ internal sealed class PlainTable(params TableColumn[] columns)
     private string[][] SetAll() => [.. columns.Select((column, index) => Set(column, [.. rows.Select(row => row[index])]))];
 
     private int[] Widths(string[][] set) =>
-        [.. set.Select((cells, index) => Math.Max(columns[index].Heading.Length, cells.Select(cell => cell.Length).DefaultIfEmpty().Max()))];
+        [.. set.Select((cells, index) => cells.Select(cell => cell.Length).Append(columns[index].Heading.Length).Max())];
 
     private static string Join(string gap, IEnumerable<string> cells) => string.Join(gap, cells).TrimEnd();
 

@@ -6,7 +6,8 @@ namespace PartitionService.Cli.Output;
 internal static class RemarkSection
 {
     private const string General =
-        "An estimate from equilibrium, not a permit to operate. Molten metal, fume and furnace gas injure and kill: local codes and licensed practice decide.";
+        "An estimate from equilibrium, not a permit to operate. Molten metal, fume and furnace gas injure and kill: "
+        + "local codes and licensed practice decide.";
 
     /// <summary>Writes the section.</summary>
     /// <param name="output">Takes the lines.</param>

@@ -37,5 +37,6 @@ internal static class Words
     /// <returns>For example "slag-activity".</returns>
     public static string Hyphenated<T>(T value)
         where T : struct, Enum =>
-        string.Concat(value.ToString().Select((letter, index) => char.IsUpper(letter) && index > 0 ? $"-{char.ToLowerInvariant(letter)}" : $"{char.ToLowerInvariant(letter)}"));
+        string.Concat(value.ToString().Select((letter, index) =>
+            (char.IsUpper(letter) && index > 0 ? "-" : "") + char.ToLowerInvariant(letter)));
 }

@@ -239,8 +239,8 @@ public sealed class VesselCaseBuilder
     private VesselCaseBuilder StateOxygen(OxygenStatement statement)
     {
         // The last of two statements would win without a word, and the answer would be for another furnace.
-        if (draft.Oxygen is not null)
-            throw new InvalidOperationException($"Oxygen is stated already, as {draft.Oxygen.StatementCase}; a vessel takes one statement.");
+        if (draft.Oxygen is { StatementCase: var stated })
+            throw new InvalidOperationException($"Oxygen is stated already, as {stated}; a vessel takes one statement.");
         draft.Oxygen = statement;
         return this;
     }

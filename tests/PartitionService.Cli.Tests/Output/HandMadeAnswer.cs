@@ -29,7 +29,10 @@ internal static class HandMadeAnswer
         Slag = new PhaseReport { MassKg = 190, AmountMol = 2800, Species = { new SpeciesContent { Species = "FeO", MoleFraction = 0.6 } } },
         Gas = new GasReport
         {
-            AmountMol = 1300, MassKg = 38, VolumeNormalCubicMetre = 29.1, DustFormingLoadGramPerNormalCubicMetre = 41.2,
+            AmountMol = 1300,
+            MassKg = 38,
+            VolumeNormalCubicMetre = 29.1,
+            DustFormingLoadGramPerNormalCubicMetre = 41.2,
             Species = { new GasSpeciesContent { Species = "N2", VolumeFraction = 0.97, PartialPressureAtm = 0.97, AmountMol = 1261 }, new GasSpeciesContent { Species = "Ag", VolumeFraction = 1e-9 } },
         },
         MechanicalDustKg = 0.02,
@@ -37,7 +40,10 @@ internal static class HandMadeAnswer
         SolventLoss = new SolventLoss { InputKg = 1000, DissolvedInSlagKg = 12, EntrainedInSlagKg = 3, GasKg = 1e-6, LossFraction = 0.015 },
         Allowances = new AllowancesReport
         {
-            MetalInSlagMassPercent = 0.5, MetalInSlagKg = 0.95, MetalInSlagSlot = "entrainment/iron-silicate", MechanicalDustMassFraction = 0.01,
+            MetalInSlagMassPercent = 0.5,
+            MetalInSlagKg = 0.95,
+            MetalInSlagSlot = "entrainment/iron-silicate",
+            MechanicalDustMassFraction = 0.01,
             StageEfficiencies = { new AppliedStageEfficiency { Element = "Sn", Efficiency = 0.8, BypassedKg = 0.6 } },
         },
         Remarks =
