@@ -38,7 +38,7 @@ internal static class ActivityIteration
             lnGamma[i] = assembled.Species[metal[i]].LnGamma ?? 0;
         }
 
-        var result = SaddleSolver.Solve(problem, assembled.OxygenLink, work, cancellation);
+        var result = SaddleSolver.Solve(problem, work, cancellation);
         var iterations = result.Iterations;
         var barrier = result.UsedBarrier;
         var passes = 0;
@@ -102,7 +102,7 @@ internal static class ActivityIteration
             if (!settled)
             {
                 ReducedSystem.Shift(problem, work);
-                result = SaddleSolver.Continue(problem, assembled.OxygenLink, work, cancellation);
+                result = SaddleSolver.Continue(problem, work, cancellation);
                 iterations += result.Iterations;
                 barrier |= result.UsedBarrier;
             }

@@ -14,7 +14,7 @@ internal static class PhaseGuess
                 .Where(e => !LinkComponents.Contains(e) && e is not ("C" or "F")).Sum(e => account.SlagCharge[e]),
             PhaseKind.Gas => (0.5 * (account.Reacting["N"] + account.Reacting["H"] + account.Reacting["Cl"]))
                 + account.Reacting["Ar"] + account.Reacting["C"],
-            _ => 1e-3 * account.Reacting["C"],
+            _ => account.Reacting["C"],
         };
         return Math.Max(guess, 1e-4 * total);
     }

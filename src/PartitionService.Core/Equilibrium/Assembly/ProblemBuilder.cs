@@ -41,7 +41,7 @@ internal sealed class ProblemBuilder(IReadOnlyDictionary<string, double> amounts
                 []));
         }
 
-        var ordered = carried.SelectMany(e => used.Where(s => s.Carried == e)).Concat(used.Where(s => s.Carried is null)).ToArray();
+        var ordered = carried.SelectMany(e => used.Where(s => s.Carried == e).OrderBy(s => s.Atoms[e])).Concat(used.Where(s => s.Carried is null)).ToArray();
         var solutes = Enumerable.Range(0, ordered.Length)
             .Where(s => ordered[s].Phase == PhaseKind.Metal && ordered[s].Name != solvent).ToArray();
         var oxygen = Array.IndexOf(links, "O");
@@ -131,6 +131,10 @@ internal sealed class ProblemBuilder(IReadOnlyDictionary<string, double> amounts
             LinkAmount = [.. links.Select(e => amounts.GetValueOrDefault(e))],
             LinkFixed = [.. links.Select((_, j) => j == oxygen && oxygenPotential is not null)],
             LinkPotential = [.. links.Select((_, j) => j == oxygen ? oxygenPotential ?? 0 : 0)],
+            SlagPhase = Array.IndexOf(phases, PhaseKind.Slag),
+            CarbonPhase = Array.IndexOf(phases, PhaseKind.Carbon),
+            CarbonIsGasified = ordered.Any(s => s is { Phase: PhaseKind.Gas, Carried: "C" }),
+            LinkHasLadder = [.. links.Select(link => ordered.Any(s => s.Phase == PhaseKind.Slag && s.Carried is not null && s.Atoms.ContainsKey(link)))],
             PhaseGuess = guess,
         };
     }

@@ -3,108 +3,56 @@ namespace PartitionService.Core.Equilibrium.Solvers;
 /// <summary>First guess of the linking potentials and phase amounts, from the problem alone.</summary>
 internal static class ColdStart
 {
+    /// <summary>A potential so low that the component is absent, far above underflow.</summary>
+    private const double Absent = -60;
+
     /// <summary>Fills links, amounts, presence and references of <paramref name="work"/>.</summary>
     /// <param name="problem">The problem.</param>
-    /// <param name="oxygen">Index of oxygen among the links, or -1.</param>
     /// <param name="work">Receives the guess.</param>
-    public static void Set(EquilibriumProblem problem, int oxygen, SolverWorkspace work)
+    public static void Set(EquilibriumProblem problem, SolverWorkspace work)
     {
         for (var phase = 0; phase < problem.PhaseCount; phase++)
         {
             work.PhaseAmount[phase] = problem.PhaseGuess[phase];
+            work.LnPhaseGuess[phase] = Math.Log(problem.PhaseGuess[phase]);
             work.Present[phase] = true;
         }
 
         for (var j = 0; j < problem.LinkCount; j++)
         {
-            // Absent until guessed: far below any potential that matters, far above underflow.
-            work.Link[j] = problem.LinkFixed[j] ? problem.LinkPotential[j] : -60;
+            work.Link[j] = problem.LinkFixed[j] ? problem.LinkPotential[j] : Absent;
         }
 
-        if (oxygen >= 0 && !problem.LinkFixed[oxygen])
-        {
-            work.Link[oxygen] = OxygenLadder(problem, oxygen, work);
-        }
-
-        ReducedSystem.SetReferences(problem, work);
         for (var j = 0; j < problem.LinkCount; j++)
         {
-            if (j != oxygen && !problem.LinkFixed[j])
+            if (problem.LinkHasLadder[j])
             {
-                work.Link[j] = Highest(problem, j, work);
+                work.Link[j] = OxidationLadder.Climb(problem, j, work);
             }
+        }
+
+        if (problem.CarbonPhase >= 0 && problem.CarbonIsGasified)
+        {
+            // Solid carbon is what is left over; starting with it would hold the potential at the carbon's for several steps.
+            work.Present[problem.CarbonPhase] = false;
+            work.PhaseAmount[problem.CarbonPhase] = 0;
         }
 
         ReducedSystem.SetReferences(problem, work);
-    }
-
-    /// <summary>
-    /// The order of oxidation: elements take oxygen from the most to the least stable oxide until the charge's oxygen is used up;
-    /// the oxide that is reached last sets the potential.
-    /// </summary>
-    private static double OxygenLadder(EquilibriumProblem problem, int oxygen, SolverWorkspace work)
-    {
-        var count = problem.ElementCount;
-        Span<double> half = stackalloc double[count];
-        Span<double> demand = stackalloc double[count];
-        var atoms = problem.LinkAtoms[oxygen];
-        for (var element = 0; element < count; element++)
+        var guessed = false;
+        for (var j = 0; j < problem.LinkCount; j++)
         {
-            half[element] = double.PositiveInfinity;
-            double reduced = double.NegativeInfinity;
-            for (var s = problem.GroupStart[element]; s < problem.GroupStart[element + 1]; s++)
+            if (!problem.LinkFixed[j] && work.Link[j] <= Absent)
             {
-                if (atoms[s] == 0 && problem.Multiplicity[s] == 1)
-                {
-                    reduced = Math.Max(reduced, problem.LnK[s] + Math.Log(work.PhaseAmount[problem.Phase[s]]));
-                }
-            }
-
-            for (var s = problem.GroupStart[element]; s < problem.GroupStart[element + 1]; s++)
-            {
-                if (atoms[s] > 0 && problem.Multiplicity[s] == 1)
-                {
-                    var oxidised = problem.LnK[s] + Math.Log(work.PhaseAmount[problem.Phase[s]]);
-                    var equal = double.IsNegativeInfinity(reduced) ? -40 : (reduced - oxidised) / atoms[s];
-                    if (equal < half[element])
-                    {
-                        half[element] = equal;
-                        demand[element] = atoms[s] * problem.ElementAmount[element];
-                    }
-                }
+                work.Link[j] = Highest(problem, j, work);
+                guessed = true;
             }
         }
 
-        var rest = problem.LinkAmount[oxygen];
-        var level = -20.0;
-        for (var taken = 0; taken < count; taken++)
+        if (guessed)
         {
-            var next = -1;
-            for (var element = 0; element < count; element++)
-            {
-                if (double.IsFinite(half[element]) && (next < 0 || half[element] < half[next]))
-                {
-                    next = element;
-                }
-            }
-
-            if (next < 0)
-            {
-                break;
-            }
-
-            level = half[next];
-            half[next] = double.PositiveInfinity;
-            if (demand[next] >= rest)
-            {
-                var share = Math.Clamp(rest / demand[next], 0.05, 0.95);
-                return Math.Clamp(level + Math.Log(share / (1 - share)), -60, 20);
-            }
-
-            rest -= demand[next];
+            ReducedSystem.SetReferences(problem, work);
         }
-
-        return Math.Clamp(Math.Max(level + 1, Highest(problem, oxygen, work)), -60, 20);
     }
 
     /// <summary>Highest potential of one link at which no species at the present references holds more than there is.</summary>
@@ -112,9 +60,10 @@ internal static class ColdStart
     {
         var highest = 60.0;
         var atoms = problem.LinkAtoms[link];
-        var linkOnly = problem.GroupStart[problem.ElementCount];
+        var lnAmount = Math.Log(problem.LinkAmount[link]);
         for (var element = 0; element <= problem.ElementCount; element++)
         {
+            var reference = element < problem.ElementCount ? work.Reference[element] : 0;
             for (var s = problem.GroupStart[element]; s < problem.GroupStart[element + 1]; s++)
             {
                 if (atoms[s] <= 0)
@@ -122,7 +71,7 @@ internal static class ColdStart
                     continue;
                 }
 
-                var exponent = problem.LnK[s] + (s < linkOnly ? problem.Multiplicity[s] * work.Reference[element] : 0);
+                var exponent = problem.LnK[s] + (problem.Multiplicity[s] * reference) + work.LnPhaseGuess[problem.Phase[s]];
                 for (var k = 0; k < problem.LinkCount; k++)
                 {
                     if (k != link)
@@ -131,11 +80,11 @@ internal static class ColdStart
                     }
                 }
 
-                var limit = Math.Log(problem.LinkAmount[link] / (atoms[s] * work.PhaseAmount[problem.Phase[s]]));
-                highest = Math.Min(highest, (limit - exponent) / atoms[s]);
+                // ln of the atoms per species is left out: a guess need not know it.
+                highest = Math.Min(highest, (lnAmount - exponent) / atoms[s]);
             }
         }
 
-        return Math.Clamp(highest, -60, 60);
+        return Math.Clamp(highest, Absent, 60);
     }
 }

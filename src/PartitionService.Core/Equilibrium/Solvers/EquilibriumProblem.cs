@@ -8,7 +8,7 @@ namespace PartitionService.Core.Equilibrium.Solvers;
 /// components O, S, Cl, Br, H that occur together with others. Amounts are N_phi x_s, sums of x are 1 in a phase that is present.
 /// </para>
 /// <para>
-/// Species are sorted by carried element; those of linking components alone come last. Arrays of species length are padded with
+/// Species are sorted by carried element and by its atoms; those of linking components alone come last. Arrays of species length are padded with
 /// species of mole fraction zero to a multiple of <see cref="Padding"/>, so that every exponential is taken by the same
 /// vector code and the result does not depend on the position of a species.
 /// </para>
@@ -26,6 +26,11 @@ internal sealed class EquilibriumProblem
 
     /// <summary>ln x of a padding species, small enough that its exponential is zero.</summary>
     public const double LnZero = -1e4;
+
+    private SpeciesEntry[]? entries;
+    private double[]? lnElementAmount;
+    private int[]? polyatomicStart;
+    private double negligible;
 
     /// <summary>Number of carried elements, each with a positive amount.</summary>
     public required int ElementCount { get; init; }
@@ -51,8 +56,14 @@ internal sealed class EquilibriumProblem
     /// <summary>Atoms of each linking component, [link][species], padded with 0.</summary>
     public required double[][] LinkAtoms { get; init; }
 
+    /// <summary>Phase, multiplicity and link of each species side by side; made from the columns.</summary>
+    public SpeciesEntry[] Entries => entries ??= SpeciesEntry.From(Phase, Multiplicity, LinkAtoms);
+
     /// <summary>Amount of each carried element in mol, positive.</summary>
     public required double[] ElementAmount { get; init; }
+
+    /// <summary>ln of the amount of each carried element.</summary>
+    public double[] LnElementAmount => lnElementAmount ??= [.. ElementAmount.Select(amount => Math.Log(amount))];
 
     /// <summary>Amount of each linking component in mol; ignored where the potential is fixed.</summary>
     public required double[] LinkAmount { get; init; }
@@ -63,6 +74,27 @@ internal sealed class EquilibriumProblem
     /// <summary>Fixed potentials; ignored where the amount is given.</summary>
     public required double[] LinkPotential { get; init; }
 
+    /// <summary>Index of the slag, or -1.</summary>
+    public required int SlagPhase { get; init; }
+
+    /// <summary>Index of the solid carbon, or -1.</summary>
+    public required int CarbonPhase { get; init; }
+
+    /// <summary>True where carbon has gas species to go to.</summary>
+    public required bool CarbonIsGasified { get; init; }
+
+    /// <summary>True for links that compounds in the slag are made of (oxygen, chlorine in a salt): their start is a ladder of stability.</summary>
+    public required bool[] LinkHasLadder { get; init; }
+
+    /// <summary>
+    /// First species with more than one atom in each element's group, whose species are sorted by atoms; the end of the group where there
+    /// is none.
+    /// </summary>
+    public int[] PolyatomicStart => polyatomicStart ??= FindPolyatomicStart();
+
+    /// <summary>Amounts below this, mol, change no balance: 1e-18 of the smallest component.</summary>
+    public double Negligible => negligible > 0 ? negligible : negligible = 1e-18 * SmallestAmount();
+
     /// <summary>Rough amount of each phase in mol for a cold start, positive.</summary>
     public required double[] PhaseGuess { get; init; }
 
@@ -71,4 +103,32 @@ internal sealed class EquilibriumProblem
 
     /// <summary>Length of the padded species arrays.</summary>
     public int PaddedCount => LnK.Length;
+
+    private int[] FindPolyatomicStart()
+    {
+        var starts = new int[ElementCount];
+        for (var element = 0; element < ElementCount; element++)
+        {
+            var s = GroupStart[element];
+            while (s < GroupStart[element + 1] && Multiplicity[s] == 1)
+            {
+                s++;
+            }
+
+            starts[element] = s;
+        }
+
+        return starts;
+    }
+
+    private double SmallestAmount()
+    {
+        var smallest = ElementAmount.Min();
+        for (var j = 0; j < LinkCount; j++)
+        {
+            smallest = LinkFixed[j] ? smallest : Math.Min(smallest, LinkAmount[j]);
+        }
+
+        return smallest;
+    }
 }

@@ -2,14 +2,14 @@ namespace PartitionService.Core.Equilibrium.Solvers;
 
 /// <summary>Newton's method on the reduced saddle: the fast method, from a cold or a warm start.</summary>
 /// <remarks>
-/// Steps are limited to 2.5 in each potential and to a factor of four in each amount. A phase that keeps shrinking is taken away;
+/// Steps are limited to 2.5 in each potential and in the logarithm of each amount. A phase that keeps shrinking is taken away;
 /// it comes back when the sum of its mole fractions exceeds 1 at the solution without it, so phases appear and vanish without a jump.
 /// </remarks>
 internal static class ReducedNewton
 {
     private const int Stride = SolverWorkspace.MaximumBorder;
     private const double LargestPotentialStep = 2.5;
-    private const double LargestAmountFactor = 4;
+    private const double LargestAmountStep = 2.5;
 
     /// <summary>Iterates from the state of <paramref name="work"/>.</summary>
     /// <param name="problem">The problem.</param>
@@ -175,10 +175,29 @@ internal static class ReducedNewton
                 work.Matrix[(row * Stride) + column] = work.Hessian[(border * Stride) + work.Unknown[column]];
             }
 
-            work.Step[row] = -work.Gradient[border];
+            work.Step[row] = RightSide(problem, work, border);
         }
 
         return size;
+    }
+
+    /// <summary>Right side of Newton's method on the logarithms of the sums and balances.</summary>
+    /// <remarks>
+    /// Sums and balances are exponentials of the unknowns, so ln(sum) = 0 and ln(held/amount) = 0 are nearly linear where the plain
+    /// residuals are not. The rows of the Jacobian only gain a common factor, so the change is one of the right side:
+    /// S ln S for 1 - S, h ln(h/b) for b - h.
+    /// </remarks>
+    private static double RightSide(EquilibriumProblem problem, SolverWorkspace work, int border)
+    {
+        var gradient = work.Gradient[border];
+        if (border >= problem.LinkCount)
+        {
+            var sum = work.PhaseSum[border - problem.LinkCount];
+            return sum > 1e-300 ? sum * Math.Log(sum) : -gradient;
+        }
+
+        var held = problem.LinkAmount[border] - gradient;
+        return held > 0 ? held * Math.Log(held / problem.LinkAmount[border]) : -gradient;
     }
 
     private static double Move(
@@ -207,10 +226,11 @@ internal static class ReducedNewton
 
             var phase = border - problem.LinkCount;
             var amount = work.PhaseAmount[phase];
-            var next = Math.Clamp(amount + move, amount / LargestAmountFactor, amount * LargestAmountFactor);
-            largest = Math.Max(largest, Math.Abs(next - amount) / amount);
-            shrinking[phase] = amount + work.Step[row] < 0 && work.PhaseSum[phase] < 1 ? shrinking[phase] + 1 : 0;
-            if (shrinking[phase] >= 3 && !required[phase])
+            var exponent = Math.Clamp(move / amount, -LargestAmountStep, LargestAmountStep);
+            var next = amount * Math.Exp(exponent);
+            largest = Math.Max(largest, Math.Abs(exponent));
+            shrinking[phase] = exponent <= -LargestAmountStep && work.PhaseSum[phase] < 1 ? shrinking[phase] + 1 : 0;
+            if (shrinking[phase] >= 2 && !required[phase])
             {
                 work.Present[phase] = false;
                 next = 0;

@@ -1,4 +1,5 @@
 using System.Numerics;
+using System.Runtime.InteropServices;
 
 namespace PartitionService.Core.Equilibrium.Solvers;
 
@@ -19,23 +20,33 @@ internal static class ReducedSystem
 {
     private const int Stride = SolverWorkspace.MaximumBorder;
 
+    /// <summary>Beyond this the species of an absent phase would overflow; the value only has to stay far above 1.</summary>
+    private const double HighestExponent = 600;
+
+    /// <summary>Mole fractions below this change no sum.</summary>
+    private const double SmallestFraction = 1e-18;
+
     /// <summary>Chooses reference activities at which the most abundant species of every carried element is near its balance.</summary>
     public static void SetReferences(EquilibriumProblem problem, SolverWorkspace work)
     {
+        Span<double> lnPhase = stackalloc double[EquilibriumProblem.MaximumPhases];
+        for (var phase = 0; phase < problem.PhaseCount; phase++)
+        {
+            lnPhase[phase] = Math.Log(Math.Max(work.PhaseAmount[phase], 1e-300));
+        }
+
+        Shift(problem, work, zero: true);
+        AddLinks(problem, work);
+        var entries = problem.Entries;
+        var exponent = work.MoleFraction;
         for (var element = 0; element < problem.ElementCount; element++)
         {
             var reference = double.PositiveInfinity;
-            var lnAmount = Math.Log(problem.ElementAmount[element]);
+            var lnAmount = problem.LnElementAmount[element];
             for (var s = problem.GroupStart[element]; s < problem.GroupStart[element + 1]; s++)
             {
-                var exponent = problem.LnK[s];
-                for (var link = 0; link < problem.LinkCount; link++)
-                {
-                    exponent += problem.LinkAtoms[link][s] * work.Link[link];
-                }
-
-                var lnPhase = Math.Log(Math.Max(work.PhaseAmount[problem.Phase[s]], 1e-300));
-                reference = Math.Min(reference, (lnAmount - lnPhase - exponent) / problem.Multiplicity[s]);
+                ref readonly var entry = ref entries[s];
+                reference = Math.Min(reference, (lnAmount - lnPhase[entry.Phase] - exponent[s]) / entry.Multiplicity);
             }
 
             work.Reference[element] = reference;
@@ -46,19 +57,22 @@ internal static class ReducedSystem
     }
 
     /// <summary>Folds the reference activities into ln K. Call after ln K or the references change.</summary>
-    public static void Shift(EquilibriumProblem problem, SolverWorkspace work)
+    public static void Shift(EquilibriumProblem problem, SolverWorkspace work, bool zero = false)
     {
-        for (var element = 0; element < problem.ElementCount; element++)
+        problem.LnK.AsSpan().CopyTo(work.Shifted);
+        if (zero)
         {
-            for (var s = problem.GroupStart[element]; s < problem.GroupStart[element + 1]; s++)
-            {
-                work.Shifted[s] = problem.LnK[s] + (problem.Multiplicity[s] * work.Reference[element]);
-            }
+            return;
         }
 
-        for (var s = problem.GroupStart[problem.ElementCount]; s < problem.PaddedCount; s++)
+        var entries = problem.Entries;
+        for (var element = 0; element < problem.ElementCount; element++)
         {
-            work.Shifted[s] = problem.LnK[s];
+            var reference = work.Reference[element];
+            for (var s = problem.GroupStart[element]; s < problem.GroupStart[element + 1]; s++)
+            {
+                work.Shifted[s] += entries[s].Multiplicity * reference;
+            }
         }
     }
 
@@ -85,12 +99,12 @@ internal static class ReducedSystem
         hessian[..(border * Stride)].Clear();
         for (var element = 0; element < problem.ElementCount; element++)
         {
-            if (!Eliminate(problem, work, element))
+            if (!Eliminate(problem, work, element, out var last))
             {
                 return false;
             }
 
-            Accumulate(problem, work, element, border);
+            Accumulate(problem, work, element, last, border);
         }
 
         AccumulateLinkOnly(problem, work);
@@ -110,47 +124,59 @@ internal static class ReducedSystem
         return true;
     }
 
-    private static void Exponentials(EquilibriumProblem problem, SolverWorkspace work)
+    /// <summary>Exponents of all species at the present links.</summary>
+    private static void AddLinks(EquilibriumProblem problem, SolverWorkspace work)
     {
         var target = work.MoleFraction.AsSpan(0, problem.PaddedCount);
-        var shifted = work.Shifted.AsSpan(0, problem.PaddedCount);
-        var width = Vector<double>.Count;
-        for (var s = 0; s < target.Length; s += width)
+        work.Shifted.AsSpan(0, problem.PaddedCount).CopyTo(target);
+        var vectors = MemoryMarshal.Cast<double, Vector<double>>(target);
+        for (var link = 0; link < problem.LinkCount; link++)
         {
-            var exponent = new Vector<double>(shifted[s..]);
-            for (var link = 0; link < problem.LinkCount; link++)
+            var atoms = MemoryMarshal.Cast<double, Vector<double>>(problem.LinkAtoms[link].AsSpan());
+            var potential = new Vector<double>(work.Link[link]);
+            for (var v = 0; v < vectors.Length && v < atoms.Length; v++)
             {
-                exponent += new Vector<double>(problem.LinkAtoms[link], s) * work.Link[link];
+                vectors[v] += atoms[v] * potential;
             }
-
-            // Beyond this a phase that is absent would overflow; the value only has to stay "far above 1".
-            exponent = Vector.Min(exponent, new Vector<double>(600.0));
-            Vector.Exp(exponent).CopyTo(target[s..]);
         }
     }
 
-    private static bool Eliminate(EquilibriumProblem problem, SolverWorkspace work, int element)
+    private static void Exponentials(EquilibriumProblem problem, SolverWorkspace work)
+    {
+        AddLinks(problem, work);
+        var vectors = MemoryMarshal.Cast<double, Vector<double>>(work.MoleFraction.AsSpan(0, problem.PaddedCount));
+        var highest = new Vector<double>(HighestExponent);
+        for (var v = 0; v < vectors.Length; v++)
+        {
+            vectors[v] = Vector.Exp(Vector.Min(vectors[v], highest));
+        }
+    }
+
+    /// <summary>
+    /// Solves the balance of one element and scales its mole fractions. <paramref name="last"/> ends the species that count: the group
+    /// without its polyatomic species where these hold nothing.
+    /// </summary>
+    private static bool Eliminate(EquilibriumProblem problem, SolverWorkspace work, int element, out int last)
     {
         var first = problem.GroupStart[element];
-        var last = problem.GroupStart[element + 1];
-        var fractions = work.MoleFraction;
+        var end = problem.GroupStart[element + 1];
+        var mono = problem.PolyatomicStart[element] - first;
+        var fractions = work.MoleFraction.AsSpan(first, end - first);
+        var entries = problem.Entries.AsSpan(first, fractions.Length);
+        var amounts = work.PhaseAmount;
         var amount = problem.ElementAmount[element];
+        last = first + mono;
         var held = 0.0;
-        var polyatomic = false;
-        for (var s = first; s < last; s++)
+        for (var s = 0; s < mono; s++)
         {
-            held += work.PhaseAmount[problem.Phase[s]] * fractions[s];
-            polyatomic |= problem.Multiplicity[s] != 1;
+            held += amounts[entries[s].Phase] * fractions[s];
         }
 
-        double relative;
-        if (polyatomic)
+        var relative = amount / held;
+        if (mono < fractions.Length && !HoldsNothing(entries[mono..], fractions[mono..], amounts, relative, problem.Negligible))
         {
-            relative = SolvePolyatomic(problem, work, first, last, amount, work.Relative[element]);
-        }
-        else
-        {
-            relative = amount / held;
+            last = end;
+            relative = SolvePolyatomic(entries, fractions, amounts, amount, Math.Min(relative, work.Relative[element]));
         }
 
         if (!(relative > 1e-250 && relative < 1e250))
@@ -159,9 +185,30 @@ internal static class ReducedSystem
         }
 
         work.Relative[element] = relative;
-        for (var s = first; s < last; s++)
+        for (var s = 0; s < mono; s++)
         {
-            fractions[s] *= polyatomic ? Power(relative, problem.Multiplicity[s]) : relative;
+            fractions[s] *= relative;
+        }
+
+        for (var s = mono; s < fractions.Length; s++)
+        {
+            fractions[s] *= Power(relative, entries[s].Multiplicity);
+        }
+
+        return true;
+    }
+
+    /// <summary>True where polyatomic species hold nothing even at the activity that the others alone would have, an upper bound.</summary>
+    private static bool HoldsNothing(
+        ReadOnlySpan<SpeciesEntry> entries, ReadOnlySpan<double> fractions, double[] amounts, double relative, double negligible)
+    {
+        for (var s = 0; s < fractions.Length; s++)
+        {
+            var fraction = fractions[s] * Power(relative, entries[s].Multiplicity);
+            if (!(fraction < SmallestFraction) || !(amounts[entries[s].Phase] * fraction < negligible))
+            {
+                return false;
+            }
         }
 
         return true;
@@ -173,16 +220,16 @@ internal static class ReducedSystem
     /// everywhere: after one step it comes from the right and stays there.
     /// </remarks>
     private static double SolvePolyatomic(
-        EquilibriumProblem problem, SolverWorkspace work, int first, int last, double amount, double start)
+        ReadOnlySpan<SpeciesEntry> entries, ReadOnlySpan<double> fractions, double[] amounts, double amount, double start)
     {
         var y = start;
         for (var iteration = 0; iteration < 100; iteration++)
         {
             double held = 0, slope = 0;
-            for (var s = first; s < last; s++)
+            for (var s = 0; s < fractions.Length; s++)
             {
-                var m = problem.Multiplicity[s];
-                var term = m * work.PhaseAmount[problem.Phase[s]] * work.MoleFraction[s] * Power(y, m);
+                var m = entries[s].Multiplicity;
+                var term = m * amounts[entries[s].Phase] * fractions[s] * Power(y, m);
                 held += term;
                 slope += m * term;
             }
@@ -208,34 +255,45 @@ internal static class ReducedSystem
         _ => Math.Pow(y, m),
     };
 
-    private static void Accumulate(EquilibriumProblem problem, SolverWorkspace work, int element, int border)
+    private static void Accumulate(EquilibriumProblem problem, SolverWorkspace work, int element, int last, int border)
     {
         var links = problem.LinkCount;
+        var first = problem.GroupStart[element];
+        var fractions = work.MoleFraction.AsSpan(first, last - first);
+        var entries = problem.Entries.AsSpan(first, fractions.Length);
+        var amounts = work.PhaseAmount;
+        var negligible = problem.Negligible;
+        var sums = work.PhaseSum;
         var row = work.Row.AsSpan(0, border);
         row.Clear();
         var square = 0.0;
-        for (var s = problem.GroupStart[element]; s < problem.GroupStart[element + 1]; s++)
+        for (var s = 0; s < fractions.Length; s++)
         {
-            var phase = problem.Phase[s];
-            var fraction = work.MoleFraction[s];
-            var m = problem.Multiplicity[s];
-            var held = work.PhaseAmount[phase] * fraction;
-            square += m * m * held;
-            row[links + phase] += m * fraction;
-            work.PhaseSum[phase] += fraction;
-            for (var j = 0; j < links; j++)
+            ref readonly var entry = ref entries[s];
+            var fraction = fractions[s];
+            double m = entry.Multiplicity;
+            var held = amounts[entry.Phase] * fraction;
+            if (held < negligible && fraction < SmallestFraction)
             {
-                var atoms = problem.LinkAtoms[j][s];
-                if (atoms != 0)
-                {
-                    row[j] += m * atoms * held;
-                    AccumulateLink(problem, work, s, j, atoms, held, fraction, phase);
-                }
+                continue;
+            }
+
+            square += m * m * held;
+            row[links + entry.Phase] += m * fraction;
+            sums[entry.Phase] += fraction;
+            if (entry.Link >= 0)
+            {
+                row[entry.Link] += m * entry.LinkAtoms * held;
+                AccumulateLink(work, links, entry.Link, entry.LinkAtoms, held, fraction, entry.Phase);
+            }
+            else if (entry.Link == SpeciesEntry.SeveralLinks)
+            {
+                AccumulateLinks(problem, work, first + s, m, held, fraction, entry.Phase, row);
             }
         }
 
         var inverse = 1 / square;
-        var hessian = work.Hessian;
+        var hessian = work.Hessian.AsSpan(0, border * Stride);
         for (var i = 0; i < border; i++)
         {
             if (row[i] == 0)
@@ -244,42 +302,53 @@ internal static class ReducedSystem
             }
 
             var scaled = row[i] * inverse;
-            for (var j = i; j < border; j++)
+            var target = hessian.Slice(i * Stride, border);
+            for (var j = i; j < row.Length && j < target.Length; j++)
             {
-                hessian[(i * Stride) + j] += scaled * row[j];
+                target[j] += scaled * row[j];
+            }
+        }
+    }
+
+    private static void AccumulateLinks(
+        EquilibriumProblem problem, SolverWorkspace work, int s, double m, double held, double fraction, int phase, Span<double> row)
+    {
+        for (var j = 0; j < problem.LinkCount; j++)
+        {
+            var atoms = problem.LinkAtoms[j][s];
+            if (atoms == 0)
+            {
+                continue;
+            }
+
+            row[j] += m * atoms * held;
+            AccumulateLink(work, problem.LinkCount, j, atoms, held, fraction, phase);
+            for (var k = j + 1; k < problem.LinkCount; k++)
+            {
+                work.Hessian[(j * Stride) + k] -= atoms * problem.LinkAtoms[k][s] * held;
             }
         }
     }
 
     private static void AccumulateLink(
-        EquilibriumProblem problem, SolverWorkspace work, int s, int j, double atoms, double held, double fraction, int phase)
+        SolverWorkspace work, int links, int j, double atoms, double held, double fraction, int phase)
     {
-        work.Gradient[j] -= atoms * held;
-        work.LinkGross[j] += Math.Abs(atoms) * held;
-        for (var k = j; k < problem.LinkCount; k++)
-        {
-            work.Hessian[(j * Stride) + k] -= atoms * problem.LinkAtoms[k][s] * held;
-        }
-
-        work.Hessian[(j * Stride) + problem.LinkCount + phase] -= atoms * fraction;
+        var taken = atoms * held;
+        work.Gradient[j] -= taken;
+        work.LinkGross[j] += Math.Abs(taken);
+        work.Hessian[(j * Stride) + j] -= atoms * taken;
+        work.Hessian[(j * Stride) + links + phase] -= atoms * fraction;
     }
 
     private static void AccumulateLinkOnly(EquilibriumProblem problem, SolverWorkspace work)
     {
         for (var s = problem.GroupStart[problem.ElementCount]; s < problem.SpeciesCount; s++)
         {
-            var phase = problem.Phase[s];
+            ref readonly var entry = ref problem.Entries[s];
             var fraction = work.MoleFraction[s];
-            work.PhaseSum[phase] += fraction;
-            var held = work.PhaseAmount[phase] * fraction;
-            for (var j = 0; j < problem.LinkCount; j++)
-            {
-                var atoms = problem.LinkAtoms[j][s];
-                if (atoms != 0)
-                {
-                    AccumulateLink(problem, work, s, j, atoms, held, fraction, phase);
-                }
-            }
+            work.PhaseSum[entry.Phase] += fraction;
+            work.Row.AsSpan().Clear();
+            AccumulateLinks(problem, work, s, 0, work.PhaseAmount[entry.Phase] * fraction, fraction, entry.Phase, work.Row);
         }
     }
 }

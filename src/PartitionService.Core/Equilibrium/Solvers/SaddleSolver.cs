@@ -28,18 +28,17 @@ internal static class SaddleSolver
 
     /// <summary>Solves from a cold start.</summary>
     /// <param name="problem">The problem.</param>
-    /// <param name="oxygen">Index of oxygen among the links, or -1.</param>
     /// <param name="work">Buffers; hold the solution afterwards.</param>
     /// <param name="cancellation">Stops the iteration.</param>
-    public static Result Solve(EquilibriumProblem problem, int oxygen, SolverWorkspace work, CancellationToken cancellation)
+    public static Result Solve(EquilibriumProblem problem, SolverWorkspace work, CancellationToken cancellation)
     {
         work.Reserve(problem);
-        ColdStart.Set(problem, oxygen, work);
-        return Continue(problem, oxygen, work, cancellation);
+        ColdStart.Set(problem, work);
+        return Continue(problem, work, cancellation);
     }
 
     /// <summary>Solves from the state of the workspace, for example after activity coefficients have changed a little.</summary>
-    public static Result Continue(EquilibriumProblem problem, int oxygen, SolverWorkspace work, CancellationToken cancellation)
+    public static Result Continue(EquilibriumProblem problem, SolverWorkspace work, CancellationToken cancellation)
     {
         var iterations = 0;
         if (ReducedNewton.TrySolve(problem, work, ref iterations, cancellation))
@@ -47,7 +46,7 @@ internal static class SaddleSolver
             return new Result(Stop.Converged, -1, iterations, false);
         }
 
-        ColdStart.Set(problem, oxygen, work);
+        ColdStart.Set(problem, work);
         var stop = BarrierMethod.Run(problem, work, out var culprit, ref iterations, cancellation);
         if (stop == BarrierMethod.Stop.PotentialUnbounded)
         {

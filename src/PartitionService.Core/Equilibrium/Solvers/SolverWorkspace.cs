@@ -12,6 +12,12 @@ internal sealed class SolverWorkspace
     /// <summary>Phase amounts in mol.</summary>
     public double[] PhaseAmount { get; } = new double[EquilibriumProblem.MaximumPhases];
 
+    /// <summary>ln of the first guess of the phase amounts.</summary>
+    public double[] LnPhaseGuess { get; } = new double[EquilibriumProblem.MaximumPhases];
+
+    /// <summary>Steps of the ladder of a cold start.</summary>
+    public OxidationLadder.Step[] LadderSteps { get; private set; } = [];
+
     /// <summary>Sum of mole fractions in each phase.</summary>
     public double[] PhaseSum { get; } = new double[EquilibriumProblem.MaximumPhases];
 
@@ -64,6 +70,7 @@ internal sealed class SolverWorkspace
         {
             Reference = new double[problem.ElementCount];
             Relative = new double[problem.ElementCount];
+            LadderSteps = new OxidationLadder.Step[OxidationLadder.Capacity(problem.ElementCount)];
         }
     }
 }

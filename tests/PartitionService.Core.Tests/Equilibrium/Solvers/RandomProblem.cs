@@ -44,15 +44,15 @@ internal static class RandomProblem
             if (gas)
             {
                 Add(Between(-25, solvent ? -10 : 2), 2, 1, 0, 0);
-                if (random.Next(4) == 0)
-                {
-                    Add(Between(-30, 10), 2, random.Next(2, 5), 0, 0);
-                }
-
                 if (random.Next(3) == 0)
                 {
                     Add(Between(-20, 10), 2, 1, 1, 0);
                     Add(Between(-20, 10), 2, 1, 0, 1);
+                }
+
+                if (random.Next(4) == 0)
+                {
+                    Add(Between(-30, 10), 2, random.Next(2, 5), 0, 0);
                 }
             }
 
@@ -97,6 +97,10 @@ internal static class RandomProblem
             LinkAmount = [oxygenHeld, Math.Pow(10, Between(-4, 2))],
             LinkFixed = [fixedOxygen, false],
             LinkPotential = [Between(-20, -5), 0],
+            SlagPhase = 1,
+            CarbonPhase = -1,
+            CarbonIsGasified = false,
+            LinkHasLadder = [true, false],
             PhaseGuess = gas ? [1e4, inert, 100] : [1e4, inert],
         };
     }

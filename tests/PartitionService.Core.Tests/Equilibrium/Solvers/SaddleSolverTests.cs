@@ -18,7 +18,7 @@ public class SaddleSolverTests
         for (var seed = 0; seed < 5000; seed++)
         {
             var problem = RandomProblem.Create(new Random(seed), fixedOxygen, gas);
-            var result = SaddleSolver.Solve(problem, 0, Work, CancellationToken.None);
+            var result = SaddleSolver.Solve(problem, Work, CancellationToken.None);
             if (result.Stop == SaddleSolver.Stop.AmountUnbounded && fixedOxygen)
             {
                 // The fixed potential alone fills a phase: no finite answer exists.
