@@ -65,6 +65,14 @@ public sealed class SlagCompositionTests
     public void Mono_cations_count_every_atom_but_oxygen() =>
         Assert.Equal(0.71330 + (2 * 0.29423), Slag(("CaO", 40), ("Al2O3", 30)).MonoCationMolPer100Gram(Catalogue.Elements), 0.0001);
 
+    /// <summary>Regression: the anions of salts were counted as cations. 30 CaF2 hold 0.38424 mol of calcium, 58.44 NaCl 1 mol of sodium.</summary>
+    [Fact]
+    public void Halogens_were_counted_as_cations()
+    {
+        Assert.Equal(0.38424, Slag(("CaF2", 30)).MonoCationMolPer100Gram(Catalogue.Elements), 0.0001);
+        Assert.Equal(1, Slag(("NaCl", 58.44)).MonoCationMolPer100Gram(Catalogue.Elements), 0.001);
+    }
+
     [Fact]
     public void Absent_oxides_are_zero() => Assert.Equal(0, Slag(("CaO", 100))["SiO2"]);
 
