@@ -134,9 +134,14 @@ internal static class CompositionRemarks
                     actual > 1.5 * high + 6 ? Severity.Warning : Severity.Note,
                     element,
                     family.Name,
-                    $"The slag holds {RemarkRules.Short(actual)} mass % {element}; usual for {family.Name} are {RemarkRules.Short(low)} to {RemarkRules.Short(high)}.",
+                    $"The slag holds {RemarkRules.Short(actual)} mass % {element}; {Usual(element, low, high)} {family.Name}.",
                     [new RemarkNumber("mass_percent", actual, "mass %")]);
             }
         }
     }
+
+    private static string Usual(string element, double low, double high) =>
+        high > 0
+            ? $"{RemarkRules.Short(low)} to {RemarkRules.Short(high)} mass % are usual for"
+            : $"{element} is no usual main constituent of";
 }

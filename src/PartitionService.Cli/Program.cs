@@ -1,0 +1,3 @@
+using PartitionService.Cli;
+
+return await Tool.RunAsync(args, Terminal.Standard).ConfigureAwait(false);
