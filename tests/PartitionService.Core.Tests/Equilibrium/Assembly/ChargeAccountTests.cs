@@ -69,10 +69,11 @@ public sealed class ChargeAccountTests
     }
 
     [Fact]
-    public void Gas_of_linking_elements_alone_has_efficiencies_of_its_own()
+    public void Gases_always_take_part()
     {
         var account = Split([new("SO2", 64.058)], new() { StageEfficiencies = [new("S", 0.5)] });
-        Assert.Equal(500, account.Bypass[ChargeOrigin.Gas]["S"], 0.1);
+        Assert.Empty(account.Bypass[ChargeOrigin.Gas].Elements);
+        Assert.Equal(1000, account.Reacting["S"], 0.1);
         Assert.Equal(2000, account.Reacting["O"], 0.1);
     }
 
