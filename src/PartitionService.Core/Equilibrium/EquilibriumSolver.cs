@@ -45,7 +45,7 @@ public sealed class EquilibriumSolver(ThermochemicalCatalogue catalogue)
         double? dissolved = vesselCase.Oxygen is OxygenStatement.Dissolved statement ? 1e-6 * statement.MassPpm : null;
         var state = ActivityIteration.Solve(
             assembly, dissolved, Catalogue.Elements, work, cancellation);
-        return FailureRules.After(assembly, state) is { } failed
+        return FailureRules.After(assembly, state, dissolved is not null) is { } failed
             ? failed
             : new SolveOutcome.Solved(new AnswerBuilder(vesselCase, Catalogue, assembly, state).Build());
     }

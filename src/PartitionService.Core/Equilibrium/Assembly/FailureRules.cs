@@ -37,12 +37,20 @@ internal static class FailureRules
     }
 
     /// <summary>Failures of the iteration; null where it converged to a sensible state.</summary>
-    public static SolveOutcome.Failed? After(VesselAssembly assembly, EquilibriumState state)
+    /// <param name="assembly">The case.</param>
+    /// <param name="state">The solution.</param>
+    /// <param name="oxygenOfMetalStated">True where the statement is the oxygen dissolved in the metal.</param>
+    public static SolveOutcome.Failed? After(VesselAssembly assembly, EquilibriumState state, bool oxygenOfMetalStated)
     {
         switch (state.Result.Stop)
         {
             case SaddleSolver.Stop.Converged:
-                return null;
+                return oxygenOfMetalStated && !(state.Amount(PhaseKind.Metal) > 0)
+                    ? new SolveOutcome.Failed(
+                        SolveFailure.DissolvedOxygenNotReachable,
+                        $"No metal is left to hold the stated dissolved oxygen: before it holds that much, all {assembly.Solvent} goes to the other phases. State less dissolved oxygen.",
+                        ["O", assembly.Solvent])
+                    : null;
             case SaddleSolver.Stop.PotentialUnbounded:
                 var link = assembly.Assembled.Links[Math.Max(0, state.Result.Culprit)];
                 var tooMuch = state.LinkPotential[Math.Max(0, state.Result.Culprit)] > 0;
@@ -59,9 +67,17 @@ internal static class FailureRules
                         [link]);
             case SaddleSolver.Stop.AmountUnbounded:
                 var phase = assembly.Assembled.Phases[Math.Max(0, state.Result.Culprit)];
+                if (phase != PhaseKind.Gas)
+                {
+                    return new SolveOutcome.Failed(
+                        SolveFailure.OxygenHasNoHome,
+                        $"At the stated oxygen potential the {phase.ToString().ToLowerInvariant()} alone would take up oxygen without limit. State a lower oxygen potential.",
+                        ["O"]);
+                }
+
                 return new SolveOutcome.Failed(
                     SolveFailure.PressureExceeded,
-                    $"The stated oxygen potential would take an unlimited amount of {phase.ToString().ToLowerInvariant()}. State a lower oxygen potential or a higher pressure.",
+                    "The stated oxygen potential would take an unlimited amount of gas. State a lower oxygen potential or a higher pressure.",
                     ["O"]);
             default:
                 return new SolveOutcome.Failed(
