@@ -24,7 +24,7 @@ public sealed class ServiceFuzzTests(ITestOutputHelper log)
         }
 
         log.WriteLine($"{Stages * perStage} messages in {clock.Elapsed.TotalSeconds:0.0} s; {run.Summary}; heap {string.Join(", ", heap.Heaps)}");
-        Assert.True(run.Faults.Count == 0, $"{run.Faults.Count} faults\n{string.Join("\n", run.Faults.Take(10))}");
+        Assert.True(run.Faults.Count == 0, $"{run.Faults.Count} faults\n{run.Report}");
         heap.AssertNoGrowth();
     }
 }

@@ -35,7 +35,8 @@ public static class FiniteNumbers
 
     private static string? Judge(string field, double number, string path)
     {
-        var share = field.EndsWith("_fraction", StringComparison.Ordinal);
+        // The dilute limit of a conversion is a line that goes on beyond the pure substance: its fraction is no share.
+        var share = field.EndsWith("_fraction", StringComparison.Ordinal) && path.StartsWith("answer.", StringComparison.Ordinal);
         return !double.IsFinite(number) || (share && number is < -Rounding or > 1 + Rounding)
             ? FormattableString.Invariant($"{path} is {number:R}")
             : null;

@@ -16,6 +16,8 @@ internal sealed class FuzzRun(int seed, IReadOnlyList<string> tokens, Func<Hosti
     /// <summary>Time that one message may take on a busy machine.</summary>
     private static readonly TimeSpan Limit = TimeSpan.FromSeconds(10);
 
+    private const int ExamplesShown = 5;
+
     private readonly ConcurrentDictionary<StatusCode, int> codes = new();
     private readonly ConcurrentBag<string> faults = [];
     private readonly ConcurrentDictionary<int, long> running = new();
@@ -26,6 +28,12 @@ internal sealed class FuzzRun(int seed, IReadOnlyList<string> tokens, Func<Hosti
 
     /// <summary>Everything that went wrong, each with seed and message.</summary>
     public IReadOnlyCollection<string> Faults => faults;
+
+    /// <summary>A few examples of every kind of fault, for a message that can be read.</summary>
+    public string Report => string.Join(
+        '\n',
+        faults.GroupBy(fault => string.Concat(fault.Take(50).Where(letter => !char.IsAsciiDigit(letter))))
+            .Select(kind => $"{kind.Count()} times, such as\n{string.Join('\n', kind.Take(ExamplesShown))}"));
 
     /// <summary>Counts, for the log of the run.</summary>
     public string Summary => string.Create(
