@@ -24,5 +24,5 @@ public sealed record PracticeAllowances
 
 /// <summary>How near an element comes to equilibrium.</summary>
 /// <param name="Element">Element symbol.</param>
-/// <param name="Efficiency">Share of the input that takes part, in [0, 1]; the rest stays in the phase it came with.</param>
+/// <param name="Efficiency">Share of the input that takes part, in [0, 1]; the rest stays in the phase it came with. Gases and organic matter always take part.</param>
 public sealed record StageEfficiency(string Element, double Efficiency);

@@ -75,7 +75,9 @@ internal sealed class ChargeAccount
         Func<string, bool> hasSlagSpecies,
         Func<string, double> usualOxygen)
     {
-        var dust = constituent.Origin == ChargeOrigin.Gas ? 0 : dustFraction;
+        // Gases and organic matter mix fully: they make no dust and always take part.
+        var gaseous = constituent.Origin == ChargeOrigin.Gas;
+        var dust = gaseous ? 0 : dustFraction;
         var fluoride = constituent.CountPerFormula.Keys.Any(e => e is "F" or "I");
         var mains = constituent.CountPerFormula.Keys.Where(e => !LinkComponents.Contains(e) && e is not ("F" or "I")).ToArray();
         var weight = mains.ToDictionary(e => e, e => constituent.CountPerFormula[e] * usualOxygen(e), StringComparer.Ordinal);
@@ -91,7 +93,7 @@ internal sealed class ChargeAccount
         {
             var inert = slagAllowed && constituent.Origin == ChargeOrigin.Slag && main is not ("C" or "N" or "Ar")
                 && (fluoride || !hasSlagSpecies(main));
-            var share = inert ? 0 : efficiency.GetValueOrDefault(main, 1);
+            var share = inert ? 0 : gaseous ? 1 : efficiency.GetValueOrDefault(main, 1);
             var partner = weightSum > 0 ? weight[main] / weightSum : 1.0 / mains.Length;
             var outside = inert ? Inert : Bypass[constituent.Origin];
             Place(main, constituent.Atoms[main] * (1 - dust), share, outside);
@@ -104,7 +106,7 @@ internal sealed class ChargeAccount
             {
                 if (LinkComponents.Contains(element) || element is "F" or "I")
                 {
-                    var linkShare = element == "S" && !inert ? efficiency.GetValueOrDefault("S", share) : share;
+                    var linkShare = element == "S" && !inert && !gaseous ? efficiency.GetValueOrDefault("S", share) : share;
                     Place(element, amount * partner * (1 - dust), linkShare, outside);
                 }
             }
@@ -114,7 +116,7 @@ internal sealed class ChargeAccount
         {
             foreach (var (element, amount) in constituent.Atoms)
             {
-                Place(element, amount * (1 - dust), efficiency.GetValueOrDefault(element, 1), Bypass[constituent.Origin]);
+                Place(element, amount * (1 - dust), gaseous ? 1 : efficiency.GetValueOrDefault(element, 1), Bypass[constituent.Origin]);
             }
         }
     }

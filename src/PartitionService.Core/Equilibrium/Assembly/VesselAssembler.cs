@@ -126,7 +126,8 @@ internal sealed class VesselAssembler(VesselCase vesselCase, ThermochemicalCatal
             .ToDictionary(e => e, e => account.Reacting[e], StringComparer.Ordinal);
         var builder = new ProblemBuilder(amounts, account.InertCations, fixedOxygen);
         var assembled = builder.Build(
-            species, [.. phases], solvent, [.. phases.Select(phase => PhaseGuess.Of(phase, account))], Epsilon);
+            species, [.. phases], solvent, [.. phases.Select(phase => PhaseGuess.Of(phase, account))],
+            InteractionIndex.Pairs(catalogue, solvent, vesselCase.Overrides), Epsilon);
         return new VesselAssembly
         {
             Account = account,
@@ -139,16 +140,12 @@ internal sealed class VesselAssembler(VesselCase vesselCase, ThermochemicalCatal
             MetalExcluded = metalExcluded,
         };
 
-        double? Epsilon(string first, string second)
+        double Epsilon(InteractionIndex.Pair pair)
         {
-            var slot = $"interaction/{solvent}/{first}/{second}";
-            var row = ledger.Select<InteractionDatum>(slot);
-            var value = ledger.Override(slot) ?? row?.Epsilon(temperature);
-            if (value is { } number)
-            {
-                ledger.Take(slot, row, $"epsilon of {first} and {second} in liquid {solvent}", number, "1", row?.SigmaEpsilon);
-            }
-
+            var row = ledger.Select<InteractionDatum>(pair.Slot);
+            var value = ledger.Override(pair.Slot) ?? row!.Epsilon(temperature);
+            ledger.Take(
+                pair.Slot, row, $"epsilon of {pair.First} and {pair.Second} in liquid {solvent}", value, "1", row?.SigmaEpsilon);
             return value;
         }
     }

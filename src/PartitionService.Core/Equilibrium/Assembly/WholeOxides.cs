@@ -50,5 +50,5 @@ internal static class WholeOxides
             elements);
 
     private static double MolarMass(string oxide, IReadOnlyDictionary<string, Element> elements) =>
-        ChemicalFormula.Parse(oxide).MolarMass(elements);
+        OxideFormulas.Get(oxide)!.MolarMass(elements);
 }

@@ -1,5 +1,6 @@
 using PartitionService.Core.Catalogue;
 using PartitionService.Core.Equilibrium.Assembly;
+using PartitionService.Core.Equilibrium.Charging;
 using PartitionService.Core.Thermodynamics;
 
 namespace PartitionService.Core.Equilibrium.Reporting;
@@ -109,8 +110,12 @@ internal sealed class AnswerBuilder(
     {
         var solvent = assembly.Solvent;
         var input = streams.MassKg(assembly.Account.Input, solvent);
-        var entrained = streams.MassKg(streams.EquilibriumMetal, solvent) * streams.MetalShareInSlag;
-        var dissolved = Math.Max(0, streams.MassKg(streams.Slag, solvent) - entrained);
+        var bypass = assembly.Account.Bypass;
+        var inMetal = streams.MassKg(streams.EquilibriumMetal, solvent) + streams.MassKg(bypass[ChargeOrigin.Metal], solvent);
+        var entrained = inMetal * streams.MetalShareInSlag;
+        var inSlag = streams.MassKg(streams.EquilibriumSlag, solvent)
+            + (assembly.Family is null ? 0 : streams.MassKg(bypass[ChargeOrigin.Slag], solvent));
+        var dissolved = inSlag * (1 - streams.SlagShareInMetal);
         var gas = streams.MassKg(streams.Gas, solvent);
         var dust = streams.MassKg(streams.Dust, solvent);
         return new SolventLoss(

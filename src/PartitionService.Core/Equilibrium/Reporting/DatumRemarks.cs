@@ -12,6 +12,12 @@ internal static class DatumRemarks
         "assumed", "assumed-gamma0", "supercooled-liquid-oxide", "oxidation-row-extrapolated", "t-extrapolated-input", "traces-only",
     };
 
+    /// <summary>Ranges are stated to whole kelvins; a distance below one is no extrapolation.</summary>
+    private const double NegligibleExtrapolationKelvin = 1;
+
+    /// <summary>Odds that must remain after a shift of two standard deviations for an assumed number to leave the destination untouched.</summary>
+    private const double RobustOdds = 100;
+
     /// <summary>All remarks about data.</summary>
     public static IEnumerable<Remark> All(ReportContext context, HashSet<string> relevant) =>
         Missing(context).Concat(Used(context, relevant)).Concat(Memory(context, relevant)).Concat(UnusedOverrides(context));
@@ -76,11 +82,11 @@ internal static class DatumRemarks
                     continue;
                 }
 
-                if (use.ExtrapolatedKelvin > 0)
+                if (use.ExtrapolatedKelvin > NegligibleExtrapolationKelvin)
                 {
                     yield return new Remark(
                         RemarkCode.ExtrapolatedInTemperature,
-                        use.ExtrapolatedKelvin > 250 ? Severity.Warning : Severity.Note,
+                        use.ExtrapolatedKelvin > 250 && !LeavesDestination(context, slot, use) ? Severity.Warning : Severity.Note,
                         ElementOf(context, slot),
                         slot,
                         $"{use.Quantity} is used {RemarkRules.Short(use.ExtrapolatedKelvin)} K outside its range.",
@@ -91,7 +97,7 @@ internal static class DatumRemarks
                 {
                     yield return new Remark(
                         RemarkCode.DatumAssumed,
-                        Severity.Warning,
+                        LeavesDestination(context, slot, use) ? Severity.Note : Severity.Warning,
                         ElementOf(context, slot),
                         slot,
                         $"{use.Quantity} is assumed so that the direction is right; do not use the figure.",
@@ -111,6 +117,21 @@ internal static class DatumRemarks
                 }
             }
         }
+    }
+
+    /// <summary>True where the element goes nearly all to one phase even if the assumed number is two standard deviations off.</summary>
+    private static bool LeavesDestination(ReportContext context, string slot, DatumUse use)
+    {
+        var symbol = ElementOf(context, slot);
+        var row = context.Elements.FirstOrDefault(e => e.Element == symbol);
+        if (row is null || use.Sigma is not { } sigma || use.Unit != "1")
+        {
+            return false;
+        }
+
+        var largest = Math.Max(row.SlagFraction, Math.Max(row.MetalFraction, row.GasFraction));
+        var elsewhere = 1 - largest - row.MechanicalDustFraction;
+        return largest > RobustOdds * Math.Exp(2 * sigma) * elsewhere;
     }
 
     private static IEnumerable<Remark> Memory(ReportContext context, HashSet<string> relevant)

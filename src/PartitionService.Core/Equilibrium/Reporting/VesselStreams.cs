@@ -27,7 +27,6 @@ internal sealed class VesselStreams
         var slag = new ElementLedger();
         AddAll(slag, EquilibriumSlag, 1);
         AddAll(assembly.Family is null ? Unplaced : slag, account.Bypass[ChargeOrigin.Slag], 1);
-        AddAll(state.Amount(PhaseKind.Gas) > 0 ? Gas : Unplaced, account.Bypass[ChargeOrigin.Gas], 1);
         AddAll(Carbon, account.Bypass[ChargeOrigin.Carbon], 1);
         foreach (var element in account.Reacting.Elements)
         {
@@ -79,6 +78,9 @@ internal sealed class VesselStreams
     /// <summary>Share of the clean metal that the slag carries.</summary>
     public double MetalShareInSlag { get; private set; }
 
+    /// <summary>Share of the clean slag that the metal carries.</summary>
+    public double SlagShareInMetal { get; private set; }
+
     /// <summary>Droplets asked for, mass % of the slag.</summary>
     public double MetalInSlagMassPercent { get; private set; }
 
@@ -128,10 +130,10 @@ internal sealed class VesselStreams
         MetalInSlagKg = toSlag;
         SlagInMetalKg = toMetal;
         MetalShareInSlag = metalMass > 0 ? toSlag / metalMass : 0;
-        var slagShare = slagMass > 0 ? toMetal / slagMass : 0;
+        SlagShareInMetal = slagMass > 0 ? toMetal / slagMass : 0;
         AddAll(Metal, metal, 1 - MetalShareInSlag);
-        AddAll(Metal, slag, slagShare);
-        AddAll(Slag, slag, 1 - slagShare);
+        AddAll(Metal, slag, SlagShareInMetal);
+        AddAll(Slag, slag, 1 - SlagShareInMetal);
         AddAll(Slag, metal, MetalShareInSlag);
     }
 }
