@@ -38,7 +38,8 @@ internal static class GasSpecies
                 continue;
             }
 
-            var energy = ledger.Override(row.Slot) ?? row.GibbsEnergy(temperatureKelvin);
+            var given = ledger.Override(row.Slot);
+            var energy = given ?? row.GibbsEnergy(temperatureKelvin);
             ledger.Take(
                 row.Slot,
                 row,
@@ -54,7 +55,11 @@ internal static class GasSpecies
                 (-energy / (PhysicalConstants.GasConstant * temperatureKelvin)) - lnPressure,
                 null,
                 "",
-                [row.Slot]);
+                [row.Slot])
+            {
+                LnKPerKelvin = -StateConversion.GibbsEnergyOverThermalPerKelvin(
+                    energy, given is null ? row.GibbsEnergyPerKelvin(temperatureKelvin) : 0, temperatureKelvin),
+            };
         }
     }
 }

@@ -20,7 +20,7 @@ internal sealed class ProblemBuilder(IReadOnlyDictionary<string, double> amounts
         PhaseKind[] phases,
         string solvent,
         double[] guess,
-        Func<string, string, double?> epsilon)
+        Func<string, string, InteractionTerm?> epsilon)
     {
         var placed = Placeable(species, phases);
         var unplaced = amounts.Keys.Where(e => !placed.Contains(e)).ToArray();
@@ -45,6 +45,7 @@ internal sealed class ProblemBuilder(IReadOnlyDictionary<string, double> amounts
         var solutes = Enumerable.Range(0, ordered.Length)
             .Where(s => ordered[s].Phase == PhaseKind.Metal && ordered[s].Name != solvent).ToArray();
         var oxygen = Array.IndexOf(links, "O");
+        var pairs = Pairs(ordered, solutes, epsilon);
         return new AssembledCase
         {
             Problem = Pack(ordered, carried, links, phases, guess, oxygen),
@@ -55,7 +56,8 @@ internal sealed class ProblemBuilder(IReadOnlyDictionary<string, double> amounts
             OxygenLink = oxygen,
             MetalSolutes = solutes,
             SolventSpecies = Array.FindIndex(ordered, s => s.Phase == PhaseKind.Metal && s.Name == solvent),
-            Interactions = new InteractionModel(Pairs(ordered, solutes, epsilon)),
+            Interactions = new InteractionModel([.. pairs.Where(pair => pair.Term.Epsilon != 0).Select(pair => (pair.First, pair.Second, pair.Term.Epsilon))]),
+            InteractionTerms = pairs,
             Unplaced = unplaced,
         };
     }
@@ -139,19 +141,19 @@ internal sealed class ProblemBuilder(IReadOnlyDictionary<string, double> amounts
         };
     }
 
-    private static List<(int First, int Second, double Epsilon)> Pairs(
-        SpeciesRecord[] ordered, int[] solutes, Func<string, string, double?> epsilon)
+    private static List<(int First, int Second, InteractionTerm Term)> Pairs(
+        SpeciesRecord[] ordered, int[] solutes, Func<string, string, InteractionTerm?> epsilon)
     {
-        var pairs = new List<(int First, int Second, double Epsilon)>();
+        var pairs = new List<(int First, int Second, InteractionTerm Term)>();
         for (var i = 0; i < solutes.Length; i++)
         {
             for (var j = i; j < solutes.Length; j++)
             {
                 var names = (ordered[solutes[i]].Name, ordered[solutes[j]].Name);
                 var (first, second) = string.CompareOrdinal(names.Item1, names.Item2) <= 0 ? names : (names.Item2, names.Item1);
-                if (epsilon(first, second) is { } value && value != 0)
+                if (epsilon(first, second) is { } term)
                 {
-                    pairs.Add((i, j, value));
+                    pairs.Add((i, j, term));
                 }
             }
         }

@@ -18,22 +18,25 @@ internal sealed class VesselAssembler(VesselCase vesselCase, ThermochemicalCatal
     {
         var family = vesselCase.SlagFamily is { } name ? catalogue.SlagFamilies[name] : null;
         var index = SlagIndex.For(catalogue);
-        var account = ChargeAccount.Split(
-            vesselCase.Charge.Select(item => ChargeReader.Read(item, catalogue.Elements)),
+        ChargeAccount Split(IEnumerable<ChargeItem> items) => ChargeAccount.Split(
+            items.Select(item => ChargeReader.Read(item, catalogue.Elements)),
             vesselCase.Allowances,
             family is not null,
             element => family is not null && index.Oxides(family.Name, element, ledger).Any(),
             index.UsualOxygen);
+        var account = Split(vesselCase.Charge);
         var solvent = SolventSelection.Choose(vesselCase.Solvent, account, catalogue, out failure);
         if (solvent is null)
         {
             return null;
         }
 
+        FixedPotential? potential = null;
         double? fixedOxygen = null;
         if (vesselCase.Oxygen is not (OxygenStatement.Closed or OxygenStatement.Dissolved))
         {
-            fixedOxygen = OxygenStatementReader.Potential(vesselCase.Oxygen, temperature, catalogue, ledger);
+            potential = OxygenStatementReader.Potential(vesselCase.Oxygen, temperature, catalogue, ledger);
+            fixedOxygen = potential?.HalfLnPressure;
         }
         else if (vesselCase.Oxygen is OxygenStatement.Dissolved)
         {
@@ -88,7 +91,7 @@ internal sealed class VesselAssembler(VesselCase vesselCase, ThermochemicalCatal
         var metalExcluded = ExcludeMetal(species, fixedOxygen, family is not null, out failure);
         return failure is not null
             ? null
-            : Build(account, species, solvent, family, slag?.Terms, fixedOxygen, metalExcluded, present);
+            : Build(account, species, solvent, family, slag?.Terms, fixedOxygen, potential, metalExcluded, present, Split);
     }
 
     private VesselAssembly Build(
@@ -98,8 +101,10 @@ internal sealed class VesselAssembler(VesselCase vesselCase, ThermochemicalCatal
         SlagFamily? family,
         SlagTerms? terms,
         double? fixedOxygen,
+        FixedPotential? potential,
         bool metalExcluded,
-        HashSet<string> present)
+        HashSet<string> present,
+        Func<IEnumerable<ChargeItem>, ChargeAccount> split)
     {
         var phases = new List<PhaseKind>();
         if (!metalExcluded)
@@ -136,20 +141,25 @@ internal sealed class VesselAssembler(VesselCase vesselCase, ThermochemicalCatal
             Family = family,
             Terms = terms,
             FixedOxygen = fixedOxygen,
+            Potential = potential,
+            Split = item => split([item]),
             MetalExcluded = metalExcluded,
         };
 
-        double? Epsilon(string first, string second)
+        InteractionTerm? Epsilon(string first, string second)
         {
             var slot = $"interaction/{solvent}/{first}/{second}";
             var row = ledger.Select<InteractionDatum>(slot);
-            var value = ledger.Override(slot) ?? row?.Epsilon(temperature);
+            var given = ledger.Override(slot);
+            var value = given ?? row?.Epsilon(temperature);
             if (value is { } number)
             {
                 ledger.Take(slot, row, $"epsilon of {first} and {second} in liquid {solvent}", number, "1", row?.SigmaEpsilon);
             }
 
-            return value;
+            return value is { } epsilon
+                ? new InteractionTerm(slot, epsilon, given is null ? row!.EpsilonPerKelvin(temperature) : 0)
+                : null;
         }
     }
 
