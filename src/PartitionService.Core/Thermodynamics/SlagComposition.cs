@@ -47,7 +47,7 @@ public sealed record SlagComposition(IReadOnlyDictionary<string, double> MassPer
         foreach (var (oxide, massPercent) in MassPercent)
         {
             var row = catalogue.Slot<OpticalBasicityDatum>($"optical-basicity/{oxide}").FirstOrDefault(r => r.Preferred);
-            if (row is null || !(massPercent > 0) || !ChemicalFormula.TryParse(oxide, out var formula, out _))
+            if (row is null || !(massPercent > 0) || OxideFormulas.Get(oxide) is not { } formula)
             {
                 continue;
             }
@@ -68,7 +68,7 @@ public sealed record SlagComposition(IReadOnlyDictionary<string, double> MassPer
         var sum = 0.0;
         foreach (var (oxide, massPercent) in MassPercent)
         {
-            if (ChemicalFormula.TryParse(oxide, out var formula, out _))
+            if (OxideFormulas.Get(oxide) is { } formula)
             {
                 sum += massPercent / formula.MolarMass(elements) * formula.Atoms.Where(atom => atom.Key != "O").Sum(atom => atom.Value);
             }
@@ -86,7 +86,7 @@ public sealed record SlagComposition(IReadOnlyDictionary<string, double> MassPer
         double moles = 0, sum = 0;
         foreach (var (oxide, massPercent) in MassPercent)
         {
-            if (!(massPercent > 0) || !ChemicalFormula.TryParse(oxide, out var formula, out _))
+            if (!(massPercent > 0) || OxideFormulas.Get(oxide) is not { } formula)
             {
                 continue;
             }

@@ -14,13 +14,15 @@ internal sealed class ProblemBuilder(IReadOnlyDictionary<string, double> amounts
     /// <param name="phases">Phases that may form, metal first.</param>
     /// <param name="solvent">Solvent.</param>
     /// <param name="guess">Rough amounts of the phases, mol, same order.</param>
-    /// <param name="epsilon">Interaction parameter of two metal species, null where there is none.</param>
+    /// <param name="interactions">Pairs of metal species with an interaction parameter.</param>
+    /// <param name="epsilon">Interaction parameter of a pair; called only for pairs of which both are in the metal.</param>
     public AssembledCase Build(
         IReadOnlyList<SpeciesRecord> species,
         PhaseKind[] phases,
         string solvent,
         double[] guess,
-        Func<string, string, InteractionTerm?> epsilon)
+        IEnumerable<InteractionIndex.Pair> interactions,
+        Func<InteractionIndex.Pair, InteractionTerm> epsilon)
     {
         var placed = Placeable(species, phases);
         var unplaced = amounts.Keys.Where(e => !placed.Contains(e)).ToArray();
@@ -41,11 +43,12 @@ internal sealed class ProblemBuilder(IReadOnlyDictionary<string, double> amounts
                 []));
         }
 
-        var ordered = carried.SelectMany(e => used.Where(s => s.Carried == e).OrderBy(s => s.Atoms[e])).Concat(used.Where(s => s.Carried is null)).ToArray();
+        var byElement = used.Where(s => s.Carried is not null).ToLookup(s => s.Carried!, StringComparer.Ordinal);
+        var ordered = carried.SelectMany(e => byElement[e].OrderBy(s => s.Atoms[e])).Concat(used.Where(s => s.Carried is null)).ToArray();
         var solutes = Enumerable.Range(0, ordered.Length)
             .Where(s => ordered[s].Phase == PhaseKind.Metal && ordered[s].Name != solvent).ToArray();
         var oxygen = Array.IndexOf(links, "O");
-        var pairs = Pairs(ordered, solutes, epsilon);
+        var pairs = Pairs(ordered, solutes, interactions, epsilon);
         return new AssembledCase
         {
             Problem = Pack(ordered, carried, links, phases, guess, oxygen),
@@ -56,7 +59,8 @@ internal sealed class ProblemBuilder(IReadOnlyDictionary<string, double> amounts
             OxygenLink = oxygen,
             MetalSolutes = solutes,
             SolventSpecies = Array.FindIndex(ordered, s => s.Phase == PhaseKind.Metal && s.Name == solvent),
-            Interactions = new InteractionModel([.. pairs.Where(pair => pair.Term.Epsilon != 0).Select(pair => (pair.First, pair.Second, pair.Term.Epsilon))]),
+            Interactions = new InteractionModel(
+                [.. pairs.Where(pair => pair.Term.Epsilon != 0).Select(pair => (pair.First, pair.Second, pair.Term.Epsilon))]),
             InteractionTerms = pairs,
             Unplaced = unplaced,
         };
@@ -71,12 +75,18 @@ internal sealed class ProblemBuilder(IReadOnlyDictionary<string, double> amounts
             placed.Add("O");
         }
 
+        var usable = species.Where(s => Array.IndexOf(phases, s.Phase) >= 0).ToArray();
         while (true)
         {
-            var held = species
-                .Where(s => Array.IndexOf(phases, s.Phase) >= 0 && s.Atoms.Keys.All(placed.Contains))
-                .SelectMany(s => s.Atoms.Where(atom => atom.Value > 0).Select(atom => atom.Key))
-                .ToHashSet(StringComparer.Ordinal);
+            var held = new HashSet<string>(StringComparer.Ordinal);
+            foreach (var s in usable)
+            {
+                if (s.Atoms.Keys.All(placed.Contains))
+                {
+                    held.UnionWith(s.Atoms.Where(atom => atom.Value > 0).Select(atom => atom.Key));
+                }
+            }
+
             if (oxygenPotential is not null)
             {
                 held.Add("O");
@@ -142,19 +152,23 @@ internal sealed class ProblemBuilder(IReadOnlyDictionary<string, double> amounts
     }
 
     private static List<(int First, int Second, InteractionTerm Term)> Pairs(
-        SpeciesRecord[] ordered, int[] solutes, Func<string, string, InteractionTerm?> epsilon)
+        SpeciesRecord[] ordered,
+        int[] solutes,
+        IEnumerable<InteractionIndex.Pair> interactions,
+        Func<InteractionIndex.Pair, InteractionTerm> epsilon)
     {
-        var pairs = new List<(int First, int Second, InteractionTerm Term)>();
+        var index = new Dictionary<string, int>(StringComparer.Ordinal);
         for (var i = 0; i < solutes.Length; i++)
         {
-            for (var j = i; j < solutes.Length; j++)
+            index[ordered[solutes[i]].Name] = i;
+        }
+
+        var pairs = new List<(int First, int Second, InteractionTerm Term)>();
+        foreach (var pair in interactions)
+        {
+            if (index.TryGetValue(pair.First, out var i) && index.TryGetValue(pair.Second, out var j))
             {
-                var names = (ordered[solutes[i]].Name, ordered[solutes[j]].Name);
-                var (first, second) = string.CompareOrdinal(names.Item1, names.Item2) <= 0 ? names : (names.Item2, names.Item1);
-                if (epsilon(first, second) is { } term)
-                {
-                    pairs.Add((i, j, term));
-                }
+                pairs.Add((i, j, epsilon(pair)));
             }
         }
 

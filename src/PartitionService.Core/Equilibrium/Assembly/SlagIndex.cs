@@ -13,6 +13,8 @@ internal sealed class SlagIndex
 
     private readonly Dictionary<string, double> usualOxygen = new(StringComparer.Ordinal) { ["C"] = 2, ["N"] = 2.5 };
 
+    private readonly List<(string Element, string Slot)> oxidationSlots = [];
+
     private SlagIndex(ThermochemicalCatalogue catalogue)
     {
         foreach (var row in catalogue.Data.OfType<SlagActivityDatum>().Where(row => row.Preferred))
@@ -31,13 +33,20 @@ internal sealed class SlagIndex
 
         foreach (var row in catalogue.Data.OfType<OxidationDatum>())
         {
-            elementOfOxide.TryAdd(row.Oxide, row.Element);
+            if (elementOfOxide.TryAdd(row.Oxide, row.Element))
+            {
+                oxidationSlots.Add((row.Element, row.Slot));
+            }
+
             usualOxygen[row.Element] = Math.Min(usualOxygen.GetValueOrDefault(row.Element, double.PositiveInfinity), row.OxygenPerMetal);
         }
     }
 
     /// <summary>The index of a catalogue.</summary>
     public static SlagIndex For(ThermochemicalCatalogue catalogue) => Indexes.GetValue(catalogue, key => new SlagIndex(key));
+
+    /// <summary>Element and slot of every oxide with a Gibbs energy of oxidation, in the order of the catalogue.</summary>
+    public IReadOnlyList<(string Element, string Slot)> OxidationSlots => oxidationSlots;
 
     /// <summary>Oxygen atoms per atom in the lowest oxide of the catalogue (carbonate, nitrate for C, N); 1 where it has none.</summary>
     public double UsualOxygen(string element) => usualOxygen.GetValueOrDefault(element, 1);

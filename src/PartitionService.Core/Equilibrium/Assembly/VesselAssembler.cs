@@ -131,7 +131,8 @@ internal sealed class VesselAssembler(VesselCase vesselCase, ThermochemicalCatal
             .ToDictionary(e => e, e => account.Reacting[e], StringComparer.Ordinal);
         var builder = new ProblemBuilder(amounts, account.InertCations, fixedOxygen);
         var assembled = builder.Build(
-            species, [.. phases], solvent, [.. phases.Select(phase => PhaseGuess.Of(phase, account))], Epsilon);
+            species, [.. phases], solvent, [.. phases.Select(phase => PhaseGuess.Of(phase, account))],
+            InteractionIndex.Pairs(catalogue, solvent, vesselCase.Overrides), Epsilon);
         return new VesselAssembly
         {
             Account = account,
@@ -146,20 +147,14 @@ internal sealed class VesselAssembler(VesselCase vesselCase, ThermochemicalCatal
             MetalExcluded = metalExcluded,
         };
 
-        InteractionTerm? Epsilon(string first, string second)
+        InteractionTerm Epsilon(InteractionIndex.Pair pair)
         {
-            var slot = $"interaction/{solvent}/{first}/{second}";
-            var row = ledger.Select<InteractionDatum>(slot);
-            var given = ledger.Override(slot);
-            var value = given ?? row?.Epsilon(temperature);
-            if (value is { } number)
-            {
-                ledger.Take(slot, row, $"epsilon of {first} and {second} in liquid {solvent}", number, "1", row?.SigmaEpsilon);
-            }
-
-            return value is { } epsilon
-                ? new InteractionTerm(slot, epsilon, given is null ? row!.EpsilonPerKelvin(temperature) : 0)
-                : null;
+            var row = ledger.Select<InteractionDatum>(pair.Slot);
+            var given = ledger.Override(pair.Slot);
+            var value = given ?? row!.Epsilon(temperature);
+            ledger.Take(
+                pair.Slot, row, $"epsilon of {pair.First} and {pair.Second} in liquid {solvent}", value, "1", row?.SigmaEpsilon);
+            return new InteractionTerm(pair.Slot, value, given is null ? row!.EpsilonPerKelvin(temperature) : 0);
         }
     }
 

@@ -58,5 +58,5 @@ internal static class WholeOxides
         Of(element) is ({ } oxide, var atoms) ? MolarMass(oxide, elements) / atoms : 0;
 
     private static double MolarMass(string oxide, IReadOnlyDictionary<string, Element> elements) =>
-        ChemicalFormula.Parse(oxide).MolarMass(elements);
+        OxideFormulas.Get(oxide)!.MolarMass(elements);
 }

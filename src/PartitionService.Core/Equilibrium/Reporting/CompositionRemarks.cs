@@ -114,12 +114,13 @@ internal static class CompositionRemarks
         var elements = context.Catalogue.Elements;
         var slagMass = context.Streams.EquilibriumSlag.MassKg(elements);
         double Low(string element, Func<SlagComponent, double> bound) => family.Components
-            .Where(c => ChemicalFormula.TryParse(c.Formula, out var f, out _) && f.Atoms.ContainsKey(element))
-            .Sum(c => bound(c) * ChemicalFormula.Parse(c.Formula).Atoms[element] * elements[element].AtomicMassGramPerMol
-                / ChemicalFormula.Parse(c.Formula).MolarMass(elements));
+            .Select(c => (Component: c, Formula: Thermodynamics.OxideFormulas.Get(c.Formula)))
+            .Where(c => c.Formula?.Atoms.ContainsKey(element) == true)
+            .Sum(c => bound(c.Component) * c.Formula!.Atoms[element] * elements[element].AtomicMassGramPerMol
+                / c.Formula.MolarMass(elements));
 
         var cations = family.Components
-            .SelectMany(c => ChemicalFormula.TryParse(c.Formula, out var f, out _) ? f.Atoms.Keys : [])
+            .SelectMany(c => Thermodynamics.OxideFormulas.Get(c.Formula)?.Atoms.Keys ?? [])
             .Concat(context.Streams.EquilibriumSlag.Elements)
             .Where(e => !LinkComponents.Contains(e) && e != "F").Distinct().Order(StringComparer.Ordinal);
         foreach (var element in cations)

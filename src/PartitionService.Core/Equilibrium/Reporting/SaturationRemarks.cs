@@ -56,14 +56,19 @@ internal static class SaturationRemarks
         var temperature = context.Case.TemperatureKelvin;
         var thermal = PhysicalConstants.GasConstant * temperature;
         var highest = new Dictionary<string, (OxidationDatum Row, double LnActivity)>(StringComparer.Ordinal);
-        foreach (var slot in context.Catalogue.Data.OfType<OxidationDatum>().Select(row => row.Slot).Distinct())
+        foreach (var (element, slot) in Assembly.SlagIndex.For(context.Catalogue).OxidationSlots)
         {
+            if (context.State.LnActivity(element) is not { } lnMetal)
+            {
+                continue;
+            }
+
             foreach (var state in new[] { StandardState.Solid, StandardState.Liquid })
             {
                 var row = context.Assembly.Ledger.Select<OxidationDatum>(
                         slot, o => o.OxideState == state && o.MetalState == StandardState.Liquid)
                     ?? context.Assembly.Ledger.Select<OxidationDatum>(slot, o => o.OxideState == state);
-                if (row is null || !row.Covers(temperature) || context.State.LnActivity(row.Element) is not { } lnMetal
+                if (row is null || !row.Covers(temperature)
                     || StateConversion.LnReferenceOverState(
                         context.Catalogue.Elements[row.Element], row.MetalState, temperature, context.Catalogue) is not { } ratio)
                 {
@@ -78,7 +83,7 @@ internal static class SaturationRemarks
             }
         }
 
-        foreach (var (element, (row, lnActivity)) in highest.OrderBy(h => h.Key, StringComparer.Ordinal))
+        foreach (var (oxidised, (row, lnActivity)) in highest.OrderBy(h => h.Key, StringComparer.Ordinal))
         {
             if (lnActivity > Margin)
             {
@@ -86,7 +91,7 @@ internal static class SaturationRemarks
                 yield return new Remark(
                     RemarkCode.ActivityAboveOne,
                     Severity.Warning,
-                    element,
+                    oxidised,
                     row.Oxide,
                     $"The activity of {(row.OxideState == StandardState.Solid ? "solid" : "liquid")} {row.Oxide} is {RemarkRules.Short(activity)}: it would separate as a phase of its own, which the model does not form.",
                     [new RemarkNumber("activity", activity, "1")]);
