@@ -24,12 +24,16 @@ internal static class CentralDifference
             DerivativeOutputKind.MetalFraction => elements[output.Element].MetalFraction,
             DerivativeOutputKind.SlagFraction => elements[output.Element].SlagFraction,
             DerivativeOutputKind.GasFraction => elements[output.Element].GasFraction,
-            DerivativeOutputKind.MetalAmount => answer.Metal?.AmountMol ?? 0,
-            DerivativeOutputKind.SlagAmount => answer.Slag?.AmountMol ?? 0,
+            DerivativeOutputKind.MetalAmount => Amount(answer.Metal, answer.Allowances?.MetalInSlagKg),
+            DerivativeOutputKind.SlagAmount => Amount(answer.Slag, answer.Allowances?.SlagInMetalKg),
             DerivativeOutputKind.GasAmount => answer.Gas?.AmountMol ?? 0,
             _ => answer.Redox.Log10OxygenPressureAtm!.Value,
         })];
     }
+
+    /// <summary>Equilibrium amount, mol; NaN where all of the phase leaves with another, because the answer does not say it then.</summary>
+    private static double Amount(PhaseReport? phase, double? carriedOverKg) =>
+        phase?.AmountMol ?? (carriedOverKg > 0 ? double.NaN : 0);
 
     /// <summary>Difference quotients of every output.</summary>
     /// <param name="at">The case with the parameter moved by an amount.</param>

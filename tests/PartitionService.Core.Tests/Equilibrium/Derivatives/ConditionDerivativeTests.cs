@@ -19,7 +19,7 @@ public sealed class ConditionDerivativeTests(ITestOutputHelper output)
             comparison.Add(report, column, CentralDifference.Of(at, step, report.Outputs));
         }
 
-        comparison.Check(2 * report.Outputs.Count, output);
+        comparison.Check(3 * report.Columns.Count, output);
     }
 
     [Theory]
@@ -60,6 +60,11 @@ public sealed class ConditionDerivativeTests(ITestOutputHelper output)
         {
             var sum = report.Columns.Sum(column => column.Values[o] * column.Value);
             var gross = report.Columns.Sum(column => Math.Abs(column.Values[o] * column.Value));
+            if (double.IsNaN(values[o]))
+            {
+                continue;
+            }
+
             var isAmount = report.Outputs[o].Kind
                 is DerivativeOutputKind.MetalAmount or DerivativeOutputKind.SlagAmount or DerivativeOutputKind.GasAmount;
             Assert.True(

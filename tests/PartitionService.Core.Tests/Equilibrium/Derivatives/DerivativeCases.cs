@@ -68,7 +68,7 @@ public static class DerivativeCases
             TemperatureKelvin = 1033,
             Solvent = "Al",
             SlagFamily = "chloride-salt",
-            Oxygen = new OxygenStatement.MetalOxidePair("Al2O3"),
+            Oxygen = new OxygenStatement.MetalOxidePair("Al2O3", 0.6),
             Charge = [new("Al", 1000), new("Mg", 12), new("Na", 0.5), new("Zn", 4), new("NaCl", 70), new("KCl", 30), new("CaF2", 2)],
         },
         ["copper fire refining"] = () => new VesselCase

@@ -32,6 +32,11 @@ internal sealed class DerivativeComparison
         for (var o = 0; o < report.Outputs.Count; o++)
         {
             var estimate = estimates[o];
+            if (double.IsNaN(estimate.Largest))
+            {
+                continue;
+            }
+
             var exact = column.Values[o];
             var label = FormattableString.Invariant(
                 $"d {report.Outputs[o].Kind} {report.Outputs[o].Element} / d {column.Kind} {column.Name}: {exact:G9}, quotient {estimate.Value:G9} +- {estimate.Error:G3}");

@@ -44,11 +44,15 @@ internal static class ParameterMoves
             : throw new InvalidOperationException("a closed case needs some O2 in its charge, so that some can be taken away");
     }
 
+    /// <summary>log10 of the oxide's activity rises by half of this per unit of log10 pO2.</summary>
+    private static double OxygenPerMetal(OxygenStatement.MetalOxidePair pair) => pair.Oxide == "FeO" ? 1 : 1.5;
+
     private static OxygenStatement Moved(OxygenStatement statement, double log10, double value) => statement switch
     {
         OxygenStatement.Pressure => new OxygenStatement.Pressure(value + log10),
         OxygenStatement.CarbonDioxideToMonoxide ratio => new OxygenStatement.CarbonDioxideToMonoxide(ratio.Ratio * Math.Pow(10, log10 / 2)),
         OxygenStatement.WaterToHydrogen ratio => new OxygenStatement.WaterToHydrogen(ratio.Ratio * Math.Pow(10, log10 / 2)),
-        _ => new OxygenStatement.Pressure(value + log10),
+        OxygenStatement.MetalOxidePair pair => pair with { OxideActivity = pair.OxideActivity * Math.Pow(10, log10 / 2 * OxygenPerMetal(pair)) },
+        _ => throw new ArgumentOutOfRangeException(nameof(statement)),
     };
 }
