@@ -75,6 +75,64 @@ public sealed class InteractionModel
         }
     }
 
+    /// <summary>Second derivatives of g, from which the derivatives of the coefficients with respect to the composition follow.</summary>
+    /// <param name="moleFraction">Mole fraction of each solute.</param>
+    /// <param name="curvature">Receives d2g/dx_i dx_j, row-major, one row per solute.</param>
+    /// <remarks>
+    /// d ln gamma_solvent/dx_j = -sum_m x_m g_mj, and d ln gamma_i/dx_j = g_ij + d ln gamma_solvent/dx_j.
+    /// </remarks>
+    public void Curvature(ReadOnlySpan<double> moleFraction, Span<double> curvature)
+    {
+        var size = moleFraction.Length;
+        curvature.Clear();
+        for (var pair = 0; pair < epsilon.Length; pair++)
+        {
+            var i = first[pair];
+            var j = second[pair];
+            var eps = epsilon[pair];
+            var (phiI, slopeI) = Bounded(moleFraction[i], eps);
+            var bendI = Bend(moleFraction[i], eps);
+            if (i == j)
+            {
+                curvature[(i * size) + i] += eps * ((slopeI * slopeI) + (phiI * bendI));
+                continue;
+            }
+
+            var (phiJ, slopeJ) = Bounded(moleFraction[j], eps);
+            curvature[(i * size) + i] += eps * bendI * phiJ;
+            curvature[(j * size) + j] += eps * Bend(moleFraction[j], eps) * phiI;
+            curvature[(i * size) + j] += eps * slopeI * slopeJ;
+            curvature[(j * size) + i] += eps * slopeI * slopeJ;
+        }
+    }
+
+    /// <summary>Derivatives of g and of its two slopes with respect to the parameter of one pair.</summary>
+    /// <param name="fractionFirst">Mole fraction of the first solute.</param>
+    /// <param name="fractionSecond">Mole fraction of the second solute; not used for a self-interaction.</param>
+    /// <param name="eps">The parameter.</param>
+    /// <param name="same">True for a self-interaction.</param>
+    /// <returns>dg/deps, d(dg/dx_first)/deps and d(dg/dx_second)/deps, the last zero for a self-interaction.</returns>
+    public static (double Energy, double First, double Second) PerEpsilon(
+        double fractionFirst, double fractionSecond, double eps, bool same)
+    {
+        var (phiI, slopeI) = Bounded(fractionFirst, eps);
+        var (phiIe, slopeIe) = BoundedPerEpsilon(fractionFirst, eps);
+        if (same)
+        {
+            return (
+                (0.5 * phiI * phiI) + (eps * phiI * phiIe),
+                (phiI * slopeI) + (eps * ((phiIe * slopeI) + (phiI * slopeIe))),
+                0);
+        }
+
+        var (phiJ, slopeJ) = Bounded(fractionSecond, eps);
+        var (phiJe, slopeJe) = BoundedPerEpsilon(fractionSecond, eps);
+        return (
+            (phiI * phiJ) + (eps * ((phiIe * phiJ) + (phiI * phiJe))),
+            (slopeI * phiJ) + (eps * ((slopeIe * phiJ) + (slopeI * phiJe))),
+            (slopeJ * phiI) + (eps * ((slopeJe * phiI) + (slopeJ * phiIe))));
+    }
+
     /// <summary>Pairs whose term is far enough from first order that the bound changes it by more than 2 %.</summary>
     /// <param name="moleFraction">Mole fraction of each solute.</param>
     /// <returns>Solute indices and the larger |eps x| of each such pair.</returns>
@@ -101,5 +159,28 @@ public sealed class InteractionModel
 
         var quarter = Math.Sqrt(Math.Sqrt(root));
         return (x / quarter, 1 / (root * quarter));
+    }
+
+    /// <summary>d2phi/dx2 = -5 u^3 (eps/2)/(1 + u^4)^(9/4) with u = eps x/2.</summary>
+    private static double Bend(double x, double eps)
+    {
+        var u = eps * x / Bound;
+        var root = 1 + (u * u * (u * u));
+        return double.IsFinite(root) ? -5 * u * u * u * (eps / Bound) / (root * root * Math.Sqrt(Math.Sqrt(root))) : 0;
+    }
+
+    /// <summary>dphi/deps = -(x^2/2) u^3/(1 + u^4)^(5/4) and d2phi/dx deps = -(5/2) x u^3/(1 + u^4)^(9/4).</summary>
+    private static (double Value, double Slope) BoundedPerEpsilon(double x, double eps)
+    {
+        var u = eps * x / Bound;
+        var root = 1 + (u * u * (u * u));
+        if (!double.IsFinite(root))
+        {
+            return (-Bound / (eps * Math.Abs(eps)), 0);
+        }
+
+        var quarter = Math.Sqrt(Math.Sqrt(root));
+        var cube = u * u * u;
+        return (-x * x / Bound * cube / (root * quarter), -5 / Bound * x * cube / (root * root * quarter));
     }
 }

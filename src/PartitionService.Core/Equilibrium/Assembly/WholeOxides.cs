@@ -25,7 +25,7 @@ internal static class WholeOxides
         var total = 0.0;
         foreach (var (element, mol) in amounts)
         {
-            var (oxide, atoms) = element == "FeO1.5" ? ("Fe2O3", 2) : ByElement.GetValueOrDefault(element);
+            var (oxide, atoms) = Of(element);
             if (oxide is null || !(mol > 0))
             {
                 continue;
@@ -48,6 +48,14 @@ internal static class WholeOxides
                 .Select(e => (e, account.SlagCharge[e] - (e == "Fe" ? account.FerricIron : 0)))
                 .Append(("FeO1.5", account.FerricIron)),
             elements);
+
+    /// <summary>Whole oxide of an element and its atoms per formula; null where it has none here. Ferric iron as "FeO1.5".</summary>
+    public static (string? Oxide, double Atoms) Of(string element) =>
+        element == "FeO1.5" ? ("Fe2O3", 2) : ByElement.TryGetValue(element, out var found) ? found : (null, 0);
+
+    /// <summary>Mass of whole oxide per mol of element, g/mol; zero where it has none here.</summary>
+    public static double GramPerMol(string element, IReadOnlyDictionary<string, Element> elements) =>
+        Of(element) is ({ } oxide, var atoms) ? MolarMass(oxide, elements) / atoms : 0;
 
     private static double MolarMass(string oxide, IReadOnlyDictionary<string, Element> elements) =>
         OxideFormulas.Get(oxide)!.MolarMass(elements);
