@@ -10,7 +10,9 @@ public sealed class FailureRulesTests
     {
         var vessel = Vessels.BlackCopper with
         {
-            GasAllowed = false, Oxygen = new OxygenStatement.Closed(), Charge = [new("Cu", 1), new("O2", 100)],
+            GasAllowed = false,
+            Oxygen = new OxygenStatement.Closed(),
+            Charge = [new("Cu", 1), new("O2", 100)],
         };
         var failure = Vessels.Failure(vessel);
         Assert.Equal(SolveFailure.OxygenHasNoHome, failure.Reason);
@@ -39,7 +41,10 @@ public sealed class FailureRulesTests
         var failure = Vessels.Failure(
             Vessels.BlackCopper with
             {
-                SlagFamily = null, GasAllowed = false, Charge = [new("Cu", 10)], Oxygen = new OxygenStatement.Pressure(-1),
+                SlagFamily = null,
+                GasAllowed = false,
+                Charge = [new("Cu", 10)],
+                Oxygen = new OxygenStatement.Pressure(-1),
             });
         Assert.Equal(SolveFailure.OxygenHasNoHome, failure.Reason);
         Assert.DoesNotContain("pressure", failure.Message, StringComparison.Ordinal);
@@ -67,7 +72,10 @@ public sealed class FailureRulesTests
     {
         var vessel = new VesselCase
         {
-            TemperatureKelvin = 1750, Solvent = "Si", Oxygen = new OxygenStatement.Dissolved(1), Charge = [new("Si", 10)],
+            TemperatureKelvin = 1750,
+            Solvent = "Si",
+            Oxygen = new OxygenStatement.Dissolved(1),
+            Charge = [new("Si", 10)],
         };
         var failure = Vessels.Failure(vessel);
         Assert.Equal(SolveFailure.DissolvedOxygenNotReachable, failure.Reason);
