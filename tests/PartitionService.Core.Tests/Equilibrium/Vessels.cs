@@ -41,7 +41,10 @@ internal static class Vessels
     /// <summary>Lead alone, without slag and gas.</summary>
     public static VesselCase Lead { get; } = new()
     {
-        TemperatureKelvin = 1000, Solvent = "Pb", Oxygen = new OxygenStatement.Closed(), Charge = [new("Pb", 100), new("Ag", 0.1)],
+        TemperatureKelvin = 1000,
+        Solvent = "Pb",
+        Oxygen = new OxygenStatement.Closed(),
+        Charge = [new("Pb", 100), new("Ag", 0.1)],
     };
 
     /// <summary>The vessel with more in it.</summary>

@@ -10,7 +10,13 @@ public sealed class PhosphorusPartitionTests
     /// <summary>Drain heat 1 as the catalogue row capacity/suito-inoue-1995-lp works it out; its 23.3 % FetO hold 77.73 % iron.</summary>
     private static readonly Dictionary<string, double> DrainHeat1 = new()
     {
-        ["CaO"] = 47.2, ["SiO2"] = 17.0, ["MgO"] = 9.8, ["Al2O3"] = 0.4, ["FeO"] = 23.3, ["MnO"] = 0.9, ["P2O5"] = 1.4,
+        ["CaO"] = 47.2,
+        ["SiO2"] = 17.0,
+        ["MgO"] = 9.8,
+        ["Al2O3"] = 0.4,
+        ["FeO"] = 23.3,
+        ["MnO"] = 0.9,
+        ["P2O5"] = 1.4,
     };
 
     private const double DrainIron = 23.3 * 55.845 / 71.844;

@@ -12,7 +12,8 @@ public sealed class RedoxReporterTests
         Assert.True(stated.Redox.OxygenToSupplyKg > 0);
         var closed = Vessels.Answer(
             Vessels.BlackCopper.Plus(new ChargeItem("O2", stated.Redox.OxygenToSupplyNormalCubicMetre, ChargeUnit.NormalCubicMetre))
-            with { Oxygen = new OxygenStatement.Closed() });
+            with
+            { Oxygen = new OxygenStatement.Closed() });
         Assert.Equal(-8, closed.Redox.Log10OxygenPressureAtm!.Value, 8);
         Assert.Equal(0, closed.Redox.OxygenToSupplyKg);
         Assert.Equal(stated.Row("Pb").MetalFraction, closed.Row("Pb").MetalFraction, 8);

@@ -95,7 +95,10 @@ public sealed class RemarkRulesTests
 
     private static VesselCase CopperWith(params ChargeItem[] items) => new()
     {
-        TemperatureKelvin = 1473, Solvent = "Cu", Oxygen = new OxygenStatement.Closed(), Charge = [new("Cu", 1000), .. items],
+        TemperatureKelvin = 1473,
+        Solvent = "Cu",
+        Oxygen = new OxygenStatement.Closed(),
+        Charge = [new("Cu", 1000), .. items],
     };
 
     private static VesselCase LeadSlag(double lime) => new()
