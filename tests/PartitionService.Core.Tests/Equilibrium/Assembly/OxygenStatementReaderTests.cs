@@ -83,7 +83,7 @@ public sealed class OxygenStatementReaderTests
     public void An_override_of_the_pair_is_stated_from_the_liquid_metal()
     {
         var ledger = Ledgers.At(1900, new DatumOverride("oxidation/FeO", OverrideKind.GibbsEnergy, -100000));
-        var potential = OxygenStatementReader.Potential(new OxygenStatement.MetalOxidePair("FeO"), 1900, Vessels.Catalogue, ledger)!.Value;
+        var potential = OxygenStatementReader.Potential(new OxygenStatement.MetalOxidePair("FeO"), 1900, Vessels.Catalogue, ledger)!.HalfLnPressure;
         Assert.Equal(-100000 / (PhysicalConstants.GasConstant * 1900), potential, 12);
         Assert.True(ledger.Uses["oxidation/FeO"][0].Overridden);
     }
@@ -96,5 +96,5 @@ public sealed class OxygenStatementReaderTests
     }
 
     private static double Read(OxygenStatement statement, double temperature) => OxygenPotential.ToLog10(
-        OxygenStatementReader.Potential(statement, temperature, Vessels.Catalogue, Ledgers.At(temperature))!.Value);
+        OxygenStatementReader.Potential(statement, temperature, Vessels.Catalogue, Ledgers.At(temperature))!.HalfLnPressure);
 }

@@ -88,21 +88,22 @@ public sealed class ProblemBuilderTests
     }
 
     [Fact]
-    public void Interactions_are_asked_for_in_ordinal_order()
+    public void Interactions_are_asked_for_only_where_both_are_in_the_metal()
     {
         var asked = new List<string>();
+        InteractionIndex.Pair[] pairs = [new("Ag", "Zn", "first"), new("Ag", "Pb", "second"), new("Zn", "Zn", "third")];
         new ProblemBuilder(new Dictionary<string, double> { ["Cu"] = 1, ["Zn"] = 1, ["Ag"] = 1 }, 0, null).Build(
-            [Metal("Cu"), Metal("Zn"), Metal("Ag")], MetalAndSlag, "Cu", [1, 1], (a, b) =>
+            [Metal("Cu"), Metal("Zn"), Metal("Ag")], MetalAndSlag, "Cu", [1, 1], pairs, pair =>
             {
-                asked.Add($"{a}-{b}");
-                return null;
+                asked.Add(pair.Slot);
+                return new InteractionTerm(pair.Slot, 1, 0);
             });
-        Assert.Equal(["Ag-Ag", "Ag-Zn", "Zn-Zn"], asked.Order(StringComparer.Ordinal));
+        Assert.Equal(["first", "third"], asked);
     }
 
     private static AssembledCase Build(
         Dictionary<string, double> amounts, double inert, double? oxygen, params SpeciesRecord[] species) =>
-        new ProblemBuilder(amounts, inert, oxygen).Build(species, MetalAndSlag, "Cu", [1, 1], (_, _) => null);
+        new ProblemBuilder(amounts, inert, oxygen).Build(species, MetalAndSlag, "Cu", [1, 1], [], _ => throw new InvalidOperationException());
 
     private static SpeciesRecord Metal(string element) =>
         new(element, PhaseKind.Metal, element, Atoms((element, 1)), 0, 0, "pure liquid", []);
