@@ -1,5 +1,3 @@
-using PartitionService.Core.Equilibrium;
-using PartitionService.IndependentSolution.Physics;
 using Xunit.Abstractions;
 
 namespace PartitionService.IndependentSolution;
@@ -46,7 +44,7 @@ public sealed class GibbsMinimumTests(ITestOutputHelper output)
     public void Potentials_of_the_answer_reproduce_every_species_of_the_answer(string name)
     {
         var answer = Answers.Service(name);
-        var check = new PotentialCheck(Cases.All[name], answer, Answers.Catalogue);
+        var check = new PotentialCheck(name, answer);
         foreach (var (phase, species, difference) in check.Differences())
         {
             Assert.True(

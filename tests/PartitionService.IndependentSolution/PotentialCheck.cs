@@ -1,4 +1,3 @@
-using PartitionService.Core.Catalogue;
 using PartitionService.Core.Equilibrium;
 using PartitionService.IndependentSolution.Physics;
 
@@ -15,10 +14,10 @@ internal sealed class PotentialCheck
     private readonly VesselSolution own;
     private readonly Dictionary<string, double> lnActivity;
 
-    public PotentialCheck(VesselCase vessel, VesselAnswer answer, ThermochemicalCatalogue catalogue)
+    public PotentialCheck(string name, VesselAnswer answer)
     {
         this.answer = answer;
-        own = new VesselSolution(vessel, catalogue);
+        own = Answers.Independent(name);
         lnActivity = answer.Elements.Where(e => e.Activity is not null).ToDictionary(e => e.Element, e => Math.Log(e.Activity!.Value));
         if (answer.Redox.Log10OxygenPressureAtm is { } log10)
         {

@@ -106,7 +106,15 @@ internal sealed class VesselSolution
                 return;
             }
 
-            GibbsMinimiser.Minimise(Problem, State);
+            if (Rounds == 1)
+            {
+                GibbsMinimiser.Minimise(Problem, State);
+            }
+            else
+            {
+                GibbsMinimiser.Polish(Problem, State);
+            }
+
             if (slag is null)
             {
                 return;

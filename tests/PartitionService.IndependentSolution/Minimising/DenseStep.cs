@@ -17,7 +17,7 @@ internal sealed class DenseStep
     private double residual;
 
     public DenseStep(
-        GibbsProblem problem, GibbsState state, int[] species, int[] phases, double[] excess, double[,]? slopes)
+        GibbsProblem problem, GibbsState state, int[] species, int[] phases, double[] excess, double[,]? slopes, double diluent)
     {
         this.problem = problem;
         this.state = state;
@@ -28,7 +28,7 @@ internal sealed class DenseStep
         matrix = Matrix<double>.Build.Dense(size, size);
         right = Vector<double>.Build.Dense(size);
         Stationarity(excess, slopes);
-        PhaseSums();
+        PhaseSums(diluent);
         Constraints();
     }
 
@@ -117,7 +117,7 @@ internal sealed class DenseStep
         }
     }
 
-    private void PhaseSums()
+    private void PhaseSums(double diluent)
     {
         for (var p = 0; p < phases.Length; p++)
         {
@@ -133,7 +133,8 @@ internal sealed class DenseStep
                 }
             }
 
-            matrix[row, row] = -1;
+            sum += diluent * Math.Exp(-state.LnTotal[phases[p]]);
+            matrix[row, row] = -sum;
             right[row] = 1 - sum;
             residual = Math.Max(residual, Math.Abs(1 - sum));
         }

@@ -10,35 +10,59 @@ namespace PartitionService.IndependentSolution.Minimising;
 /// </remarks>
 internal static class GibbsMinimiser
 {
-    private const double Tolerance = 1e-12;
+    /// <summary>Potentials are near 100, so that rounding alone moves a step by 1e-13; the constraints are held to the same number.</summary>
+    private const double Tolerance = 1e-11;
 
-    /// <summary>Minimises from a state; the state holds the minimum afterwards.</summary>
-    /// <returns>Number of Newton steps.</returns>
-    public static int Minimise(GibbsProblem problem, GibbsState state)
+    /// <summary>Minimises from scratch; the state holds the minimum afterwards.</summary>
+    /// <remarks>
+    /// Every phase holds a little of an inert diluent of its own, so that all phases exist and the energy is smooth and convex; the diluent
+    /// is taken away by decades. Henry's law first, the excess energy from a millionth of the amounts on.
+    /// </remarks>
+    public static void Minimise(GibbsProblem problem, GibbsState state)
     {
-        var withExcess = false;
-        for (var step = 1; step <= 2000; step++)
+        var total = problem.Amount.Sum();
+        var diluent = 0.1;
+        for (; diluent > 1e-16; diluent *= 0.1)
+        {
+            Iterate(problem, state, diluent * total, diluent < 2e-6, 1e-2);
+        }
+
+        foreach (var phase in problem.Phases)
+        {
+            // Of an absent phase there is no more than the diluent over its deficit.
+            state.Active[(int)phase] = Math.Exp(state.LnTotal[(int)phase]) > 1e7 * diluent * total;
+        }
+
+        Polish(problem, state);
+    }
+
+    /// <summary>Minimises from a state near the minimum.</summary>
+    public static void Polish(GibbsProblem problem, GibbsState state)
+    {
+        do
+        {
+            Iterate(problem, state, 0, true, Tolerance);
+        }
+        while (Add(problem, state));
+    }
+
+    private static void Iterate(GibbsProblem problem, GibbsState state, double diluent, bool withExcess, double tolerance)
+    {
+        for (var step = 0; step < 400; step++)
         {
             var excess = withExcess ? Excess(problem, state) : new double[problem.Species.Length];
-            var size = Step(problem, state, excess, withExcess);
-            if (size > Tolerance || Remove(problem, state))
+            if (Step(problem, state, excess, withExcess && !problem.Excess.IsEmpty, diluent) <= tolerance)
             {
-                continue;
+                return;
             }
 
-            if (!withExcess && !problem.Excess.IsEmpty)
+            if (diluent == 0)
             {
-                withExcess = true;
-                continue;
-            }
-
-            if (!Add(problem, state))
-            {
-                return step;
+                Remove(problem, state);
             }
         }
 
-        throw new InvalidOperationException("the independent minimisation did not end");
+        throw new InvalidOperationException(FormattableString.Invariant($"the independent minimisation did not end at diluent {diluent:E1}"));
     }
 
     /// <summary>ln x of a species at given potentials of the elements, as if its phase were there.</summary>
@@ -70,11 +94,11 @@ internal static class GibbsMinimiser
 
     /// <summary>One Newton step.</summary>
     /// <returns>Largest full step in any logarithm and largest relative residual of a constraint.</returns>
-    private static double Step(GibbsProblem problem, GibbsState state, double[] excess, bool withExcess)
+    private static double Step(GibbsProblem problem, GibbsState state, double[] excess, bool withSlopes, double diluent)
     {
         int[] species = [.. Enumerable.Range(0, problem.Species.Length).Where(s => state.IsActive(problem, s))];
         int[] phases = [.. Enumerable.Range(0, 4).Where(p => state.Active[p])];
-        var dense = new DenseStep(problem, state, species, phases, excess, withExcess ? ExcessSlopes(problem, state) : null);
+        var dense = new DenseStep(problem, state, species, phases, excess, withSlopes ? ExcessSlopes(problem, state) : null, diluent);
         Vector<double> solution = dense.Solve();
         return dense.Apply(solution);
     }
@@ -100,20 +124,13 @@ internal static class GibbsMinimiser
     }
 
     /// <summary>Takes away phases that have shrunk to nothing.</summary>
-    private static bool Remove(GibbsProblem problem, GibbsState state)
+    private static void Remove(GibbsProblem problem, GibbsState state)
     {
-        var largest = Enumerable.Range(0, 4).Where(p => state.Active[p]).Max(p => state.LnTotal[p]);
-        var any = false;
-        for (var phase = 0; phase < 4; phase++)
+        var largest = problem.Phases.Where(p => state.Active[(int)p]).Max(p => state.LnTotal[(int)p]);
+        foreach (var phase in problem.Phases)
         {
-            if (state.Active[phase] && state.LnTotal[phase] < largest - 36)
-            {
-                state.Active[phase] = false;
-                any = true;
-            }
+            state.Active[(int)phase] &= state.LnTotal[(int)phase] > largest - 36;
         }
-
-        return any;
     }
 
     /// <summary>Brings in phases that would lower the energy: the sum of the mole fractions at the potentials exceeds 1.</summary>
