@@ -108,8 +108,22 @@ internal static class FailureRules
                     "The stated oxygen potential would take an unlimited amount of gas. State a lower oxygen potential or a higher pressure.",
                     ["O"]);
             default:
-                return new SolveOutcome.Failed(
-                    SolveFailure.NotConverged, "The iteration did not converge. Please report the case.", []);
+                return HoldsTooMuchSulfur(state)
+                    ? new SolveOutcome.Failed(
+                        SolveFailure.ElementHasNoHome,
+                        "The slag would have to hold more sulfur than a sulfide capacity describes; in practice a matte would form, which the model lacks. Charge less sulfur or allow a gas.",
+                        ["S"])
+                    : new SolveOutcome.Failed(
+                        SolveFailure.NotConverged, "The iteration did not converge. Please report the case.", []);
         }
+    }
+
+    /// <summary>True where sulfide has displaced a tenth of the slag or the sulfur pressure is beyond any vessel's.</summary>
+    private static bool HoldsTooMuchSulfur(EquilibriumState state)
+    {
+        const double largestSulfide = 0.1;
+        const double largestLnActivity = 5;
+        var sulfide = Array.FindIndex(state.Assembled.Species, s => s is { Phase: PhaseKind.Slag, Name: "S" });
+        return sulfide >= 0 && (state.MoleFraction[sulfide] > largestSulfide || state.LnActivity("S") > largestLnActivity);
     }
 }

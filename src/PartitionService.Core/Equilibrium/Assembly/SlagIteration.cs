@@ -44,18 +44,23 @@ internal sealed class SlagIteration
         }
     }
 
-    /// <summary>Moves every constant by a share of its distance from the solution's composition.</summary>
-    /// <returns>The largest distance.</returns>
-    public double Move(SolverWorkspace work, double share)
+    /// <summary>Number of constants; the length of the distances.</summary>
+    public int Count => terms.All.Count;
+
+    /// <summary>Measures how far every constant is from the one at the solution's composition.</summary>
+    /// <param name="work">The solution.</param>
+    /// <param name="distance">Receives target minus present ln K; zero for terms that are not in the case.</param>
+    public void Measure(SolverWorkspace work, Span<double> distance)
     {
         var slag = WholeOxides.Composition(Amounts(work), elements) ?? SlagComposition.Typical(assembly.Family!);
         var metal = new SlagTerms.MetalSide(
             LnGammaPhosphorus(), MeanMetalMass(work), assembled.OxygenLink >= 0 ? work.Link[assembled.OxygenLink] : 0);
-        var largest = 0.0;
-        foreach (var term in terms.All)
+        for (var i = 0; i < terms.All.Count; i++)
         {
+            var term = terms.All[i];
             if (term.Index < 0)
             {
+                distance[i] = 0;
                 continue;
             }
 
@@ -65,12 +70,20 @@ internal sealed class SlagIteration
                 target -= LnExchangeShare(work, term.Index, target);
             }
 
-            var distance = target - assembled.Problem.LnK[term.Index];
-            largest = Math.Max(largest, Math.Abs(distance));
-            assembled.Problem.LnK[term.Index] += share * distance;
+            distance[i] = target - assembled.Problem.LnK[term.Index];
         }
+    }
 
-        return largest;
+    /// <summary>Moves every constant.</summary>
+    public void Move(ReadOnlySpan<double> change)
+    {
+        for (var i = 0; i < terms.All.Count; i++)
+        {
+            if (terms.All[i].Index >= 0)
+            {
+                assembled.Problem.LnK[terms.All[i].Index] += change[i];
+            }
+        }
     }
 
     /// <summary>
