@@ -76,6 +76,12 @@ internal static class ActivityIteration
             if (slag is not null)
             {
                 change = Math.Max(change, slag.Move(work, damping));
+                if (slag.SulfideIsFull)
+                {
+                    var sulfur = Array.IndexOf(assembled.Links, "S");
+                    return new EquilibriumState(
+                        assembled, work, result with { Stop = SaddleSolver.Stop.PotentialUnbounded, Culprit = sulfur }, iterations, passes, barrier, solventLnGamma);
+                }
             }
 
             settled = change <= Convergence.ActivityTolerance;

@@ -7,12 +7,19 @@ namespace PartitionService.Core.Equilibrium.Assembly;
 /// <summary>Moves the slag constants that depend on composition towards the composition of the solution.</summary>
 internal sealed class SlagIteration
 {
+    /// <summary>ln of the supersaturation at which the slag's oxide ions count as used up.</summary>
+    private const double FullSulfide = 100;
+
+    private const double LargestSulfideStep = 8;
+
     private readonly AssembledCase assembled;
     private readonly VesselAssembly assembly;
     private readonly SlagTerms terms;
     private readonly IReadOnlyDictionary<string, Element> elements;
     private readonly int slagPhase;
     private readonly (string Element, double Mol)[] inert;
+    private (double Value, double Target) lastSulfide = (double.NaN, double.NaN);
+    private double sulfideSlope;
 
     /// <summary>Prepares the terms of an assembled case.</summary>
     public SlagIteration(VesselAssembly assembly, IReadOnlyDictionary<string, Element> elements)
@@ -31,6 +38,9 @@ internal sealed class SlagIteration
 
     /// <summary>True where nothing depends on the slag's composition.</summary>
     public bool IsEmpty => !terms.All.Any(term => term.Index >= 0);
+
+    /// <summary>True where the sulfur exceeds the oxide ions of the slag.</summary>
+    public bool SulfideIsFull { get; private set; }
 
     /// <summary>Sets the constants at the composition of the charge, or the family's usual one.</summary>
     public void Start()
@@ -62,15 +72,34 @@ internal sealed class SlagIteration
             var target = terms.LnK(term, slag, metal);
             if (term.Kind == SlagTerms.TermKind.Sulfide)
             {
-                target -= LnExchangeShare(work, term.Index, target);
+                var exchange = LnExchangeShare(work, term.Index, target);
+                SulfideIsFull = exchange > FullSulfide;
+                target -= exchange;
             }
 
             var distance = target - assembled.Problem.LnK[term.Index];
             largest = Math.Max(largest, Math.Abs(distance));
-            assembled.Problem.LnK[term.Index] += share * distance;
+            assembled.Problem.LnK[term.Index] += term.Kind == SlagTerms.TermKind.Sulfide
+                ? SulfideStep(target, assembled.Problem.LnK[term.Index])
+                : share * distance;
         }
 
         return largest;
+    }
+
+    /// <summary>
+    /// Secant step of the sulfide's constant. Where the slag is the only home of sulfur, its amount hardly follows the constant and plain
+    /// passes approach the solution by x_S/x_O each; where there is none because sulfur exceeds the oxide ions, the steps run away.
+    /// </summary>
+    private double SulfideStep(double target, double current)
+    {
+        if (Math.Abs(current - lastSulfide.Value) > 1e-10)
+        {
+            sulfideSlope = Math.Min(0.999, (target - lastSulfide.Target) / (current - lastSulfide.Value));
+        }
+
+        lastSulfide = (current, target);
+        return Math.Clamp((target - current) / (1 - sulfideSlope), -LargestSulfideStep, LargestSulfideStep);
     }
 
     /// <summary>

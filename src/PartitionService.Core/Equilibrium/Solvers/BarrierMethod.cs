@@ -64,10 +64,12 @@ internal static class BarrierMethod
             }
         }
 
+        Span<bool> required = stackalloc bool[EquilibriumProblem.MaximumPhases];
+        ReducedNewton.FindRequired(problem, required);
         for (var phase = 0; phase < problem.PhaseCount; phase++)
         {
             // On the path N (1 - sum x) = mu: of a phase that is absent the amount vanishes, of one that is present the deficit does.
-            if (1 - work.PhaseSum[phase] > work.PhaseAmount[phase] / total)
+            if (!required[phase] && 1 - work.PhaseSum[phase] > work.PhaseAmount[phase] / total)
             {
                 work.Present[phase] = false;
                 work.PhaseAmount[phase] = 0;

@@ -97,7 +97,7 @@ internal static class ReducedNewton
     }
 
     /// <summary>Phases that alone can hold some component: they cannot vanish.</summary>
-    private static void FindRequired(EquilibriumProblem problem, Span<bool> required)
+    public static void FindRequired(EquilibriumProblem problem, Span<bool> required)
     {
         required.Clear();
         for (var element = 0; element < problem.ElementCount; element++)
