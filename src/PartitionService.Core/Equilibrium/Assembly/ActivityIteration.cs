@@ -85,7 +85,11 @@ internal static class ActivityIteration
             }
 
             settled = change <= Convergence.ActivityTolerance;
-            damping = change > 0.9 * lastChange ? Math.Max(0.05, 0.7 * damping) : Math.Min(1, 1.1 * damping);
+
+            // A pass that came as near as its damping lets it asks for a longer step; one that came no nearer for a shorter.
+            damping = change > 0.98 * lastChange ? Math.Max(0.02, 0.6 * damping)
+                : change < (1 - (0.5 * damping)) * lastChange ? Math.Min(1, 1.3 * damping)
+                : damping;
             lastChange = change;
             solventLnGamma += damping * (solventTarget - solventLnGamma);
             for (var i = 0; i < metal.Length; i++)

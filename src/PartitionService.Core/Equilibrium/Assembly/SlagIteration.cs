@@ -7,8 +7,8 @@ namespace PartitionService.Core.Equilibrium.Assembly;
 /// <summary>Moves the slag constants that depend on composition towards the composition of the solution.</summary>
 internal sealed class SlagIteration
 {
-    /// <summary>ln of the supersaturation at which the slag's oxide ions count as used up.</summary>
-    private const double FullSulfide = 100;
+    /// <summary>ln of the supersaturation at which the slag's oxide ions count as used up: six of a million are left.</summary>
+    private const double FullSulfide = 12;
 
     private const double LargestSulfideStep = 8;
 
@@ -39,7 +39,7 @@ internal sealed class SlagIteration
     /// <summary>True where nothing depends on the slag's composition.</summary>
     public bool IsEmpty => !terms.All.Any(term => term.Index >= 0);
 
-    /// <summary>True where the sulfur exceeds the oxide ions of the slag.</summary>
+    /// <summary>True where only the slag could hold the sulfur and its oxide ions are used up.</summary>
     public bool SulfideIsFull { get; private set; }
 
     /// <summary>Sets the constants at the composition of the charge, or the family's usual one.</summary>
@@ -73,7 +73,7 @@ internal sealed class SlagIteration
             if (term.Kind == SlagTerms.TermKind.Sulfide)
             {
                 var exchange = LnExchangeShare(work, term.Index, target);
-                SulfideIsFull = exchange > FullSulfide;
+                SulfideIsFull = exchange > FullSulfide && !SulfurHasOtherHome(term.Index);
                 target -= exchange;
             }
 
@@ -86,6 +86,9 @@ internal sealed class SlagIteration
 
         return largest;
     }
+
+    private bool SulfurHasOtherHome(int sulfide) =>
+        Enumerable.Range(0, assembled.Species.Length).Any(s => s != sulfide && assembled.Species[s].Atoms.GetValueOrDefault("S") > 0);
 
     /// <summary>
     /// Secant step of the sulfide's constant. Where the slag is the only home of sulfur, its amount hardly follows the constant and plain
@@ -119,7 +122,7 @@ internal sealed class SlagIteration
         }
 
         var dilute = lnK - problem.LnK[sulfide] + Math.Log(Math.Max(work.MoleFraction[sulfide], 1e-300));
-        return Math.Log(1 + Math.Exp(Math.Min(dilute - Math.Log(Math.Max(oxygen, 1e-12)), 600)));
+        return Math.Log(1 + Math.Exp(Math.Min(dilute - Math.Log(Math.Max(oxygen, 1e-100)), 600)));
     }
 
     private IEnumerable<(string Element, double Mol)> Amounts(SolverWorkspace work)
