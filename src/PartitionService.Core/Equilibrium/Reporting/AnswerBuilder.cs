@@ -76,7 +76,7 @@ internal sealed class AnswerBuilder(
                 streams.Unplaced[symbol],
             };
             var output = shares.Sum();
-            if (!(input > 0) && !(output > 0))
+            if (input == 0 && output == 0)
             {
                 continue;
             }
@@ -85,6 +85,11 @@ internal sealed class AnswerBuilder(
             largestError = Math.Max(
                 largestError, Math.Abs(output - input) / Math.Max(Math.Max(input, output), Math.Abs(supply)));
             input = supply == 0 ? input : output;
+            if (!(output > 0))
+            {
+                continue;
+            }
+
             var inMetal = streams.EquilibriumMetal[symbol];
             var inSlag = streams.EquilibriumSlag[symbol];
             rows.Add(new ElementDistribution
