@@ -1,4 +1,5 @@
 using System.Globalization;
+using System.Text;
 
 namespace PartitionService.Core.Catalogue;
 
@@ -26,7 +27,7 @@ internal sealed class ChemicalFormulaReader(string text)
                 ? OpenGroup(character, nesting)
                 : char.IsAsciiLetterUpper(character)
                     ? ReadSymbol()
-                    : Fail(start, $"'{character}' cannot start an element symbol or a group");
+                    : Fail(start, $"'{WholeCharacter(start)}' cannot start an element symbol or a group");
             if (inner is null || ReadCount() is not { } count || !Add(atoms, inner, count, start))
                 return null;
         }
@@ -101,6 +102,9 @@ internal sealed class ChemicalFormulaReader(string text)
 
         return true;
     }
+
+    /// <summary>The character at a position, both halves of a pair: half of one is no text.</summary>
+    private string WholeCharacter(int at) => Rune.TryGetRuneAt(text, at, out var rune) ? rune.ToString() : "\uFFFD";
 
     private OrderedDictionary<string, double>? Fail(int at, string reason)
     {

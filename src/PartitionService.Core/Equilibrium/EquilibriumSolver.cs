@@ -54,9 +54,17 @@ public sealed class EquilibriumSolver(ThermochemicalCatalogue catalogue)
 
         var work = threadWorkspace ??= new SolverWorkspace();
         double? dissolved = vesselCase.Oxygen is OxygenStatement.Dissolved statement ? 1e-6 * statement.MassPpm : null;
-        var state = ActivityIteration.Solve(
-            assembly, dissolved, Catalogue.Elements, work, cancellation);
-        if (FailureRules.After(assembly, state) is { } failed)
+        var state = ActivityIteration.Solve(assembly, dissolved, Catalogue.Elements, work, cancellation);
+        if (FailureRules.IsOverblown(assembly, state) && assembly.Family is not null
+            && new VesselAssembler(vesselCase, Catalogue, withoutMetal: true).Assemble(out _) is { } blown
+            && ActivityIteration.Solve(blown, null, Catalogue.Elements, work, cancellation) is { } blownState
+            && FailureRules.After(blown, blownState, false) is null)
+        {
+            assembly = blown;
+            state = blownState;
+        }
+
+        if (FailureRules.After(assembly, state, dissolved is not null) is { } failed)
         {
             return failed;
         }

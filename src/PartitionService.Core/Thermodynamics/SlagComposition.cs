@@ -70,7 +70,8 @@ public sealed record SlagComposition(IReadOnlyDictionary<string, double> MassPer
         {
             if (OxideFormulas.Get(oxide) is { } formula)
             {
-                sum += massPercent / formula.MolarMass(elements) * formula.Atoms.Where(atom => atom.Key != "O").Sum(atom => atom.Value);
+                sum += massPercent / formula.MolarMass(elements)
+                    * formula.Atoms.Where(atom => atom.Key is not ("O" or "F" or "Cl" or "Br" or "I")).Sum(atom => atom.Value);
             }
         }
 

@@ -77,5 +77,6 @@ internal static class FieldViolations
         return text[..length] + "...";
     }
 
-    private static CaseViolation Shown(CaseViolation violation) => violation with { Value = Shorten(violation.Value) };
+    private static CaseViolation Shown(CaseViolation violation) =>
+        violation with { Value = VisibleText.Of(Shorten(violation.Value)), Allowed = VisibleText.Of(violation.Allowed) };
 }

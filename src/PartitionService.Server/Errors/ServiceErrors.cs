@@ -34,14 +34,15 @@ internal static class ServiceErrors
 
     /// <summary>NOT_FOUND for a slot or key that the catalogue lacks.</summary>
     public static ServiceException UnknownDatum(string slot) =>
-        new(StatusCode.NotFound, ErrorReason.UnknownDatum, $"The catalogue has no datum '{FieldViolations.Shorten(slot)}'; ListData lists its slots.");
+        new(StatusCode.NotFound, ErrorReason.UnknownDatum, $"The catalogue has no datum '{VisibleText.Of(FieldViolations.Shorten(slot))}'; ListData lists its slots.");
 
     /// <summary>INVALID_ARGUMENT for a page token of another list, filter or catalogue.</summary>
-    public static ServiceException InvalidPageToken() =>
+    public static ServiceException InvalidPageToken(string token) =>
         new(
             StatusCode.InvalidArgument,
             ErrorReason.InvalidPageToken,
-            "page_token was not issued for this list, filter and catalogue; start again with an empty token.");
+            "page_token was not issued for this list, filter and catalogue; start again with an empty token.",
+            violations: [new CaseViolation("page_token", token, "must be the next_page_token of the page before, with the same filter, or empty")]);
 
     /// <summary>DEADLINE_EXCEEDED.</summary>
     public static ServiceException DeadlineExceeded() =>

@@ -27,7 +27,7 @@ internal sealed class Pager(ThermochemicalCatalogue catalogue)
     {
         var offset = 0;
         if (token.Length > 0 && (!PageToken.TryRead(token, catalogue.Digest, list, out offset) || offset >= all.Count))
-            throw ServiceErrors.InvalidPageToken();
+            throw ServiceErrors.InvalidPageToken(token);
         T[] entries = [.. all.Skip(offset).Take(pageSize == 0 ? DefaultSize : pageSize)];
         var next = offset + entries.Length;
         return new Page<T>(entries, next < all.Count ? PageToken.Write(catalogue.Digest, list, next) : "", all.Count);

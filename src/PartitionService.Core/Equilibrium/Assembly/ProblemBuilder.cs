@@ -43,6 +43,9 @@ internal sealed class ProblemBuilder(IReadOnlyDictionary<string, double> amounts
                 []));
         }
 
+        // A phase that nothing can enter would leave an empty row in the system.
+        guess = [.. guess.Where((_, index) => used.Exists(s => s.Phase == phases[index]))];
+        phases = [.. phases.Where(phase => used.Exists(s => s.Phase == phase))];
         var byElement = used.Where(s => s.Carried is not null).ToLookup(s => s.Carried!, StringComparer.Ordinal);
         var ordered = carried.SelectMany(e => byElement[e].OrderBy(s => s.Atoms[e])).Concat(used.Where(s => s.Carried is null)).ToArray();
         var solutes = Enumerable.Range(0, ordered.Length)

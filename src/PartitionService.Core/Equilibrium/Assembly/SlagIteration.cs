@@ -59,12 +59,38 @@ internal sealed class SlagIteration
                 continue;
             }
 
-            var distance = terms.LnK(term, slag, metal) - assembled.Problem.LnK[term.Index];
+            var target = terms.LnK(term, slag, metal);
+            if (term.Kind == SlagTerms.TermKind.Sulfide)
+            {
+                target -= LnExchangeShare(work, term.Index, target);
+            }
+
+            var distance = target - assembled.Problem.LnK[term.Index];
             largest = Math.Max(largest, Math.Abs(distance));
             assembled.Problem.LnK[term.Index] += share * distance;
         }
 
         return largest;
+    }
+
+    /// <summary>
+    /// The capacity is the limit of few sulfide ions. A sulfide ion takes the place of an oxide ion, (O) + 1/2 S2 = (S) + 1/2 O2, so x_S =
+    /// K a (1 - x_S/x_O) with x_O the oxide ions that the cations bring: the slag cannot hold more sulfide than that.
+    /// </summary>
+    private double LnExchangeShare(SolverWorkspace work, int sulfide, double lnK)
+    {
+        var problem = assembled.Problem;
+        var oxygen = work.Present[slagPhase] ? assembly.Account.Inert["O"] / work.PhaseAmount[slagPhase] : 0;
+        for (var s = 0; s < assembled.Species.Length; s++)
+        {
+            if (problem.Phase[s] == slagPhase && s != sulfide)
+            {
+                oxygen += work.MoleFraction[s] * problem.LinkAtoms[assembled.OxygenLink][s];
+            }
+        }
+
+        var dilute = lnK - problem.LnK[sulfide] + Math.Log(Math.Max(work.MoleFraction[sulfide], 1e-300));
+        return Math.Log(1 + Math.Exp(Math.Min(dilute - Math.Log(Math.Max(oxygen, 1e-12)), 600)));
     }
 
     private IEnumerable<(string Element, double Mol)> Amounts(SolverWorkspace work)

@@ -7,7 +7,8 @@ namespace PartitionService.Core.Equilibrium.Assembly;
 /// <summary>Builds a <see cref="VesselAssembly"/>.</summary>
 /// <param name="vesselCase">A valid case.</param>
 /// <param name="catalogue">The catalogue.</param>
-internal sealed class VesselAssembler(VesselCase vesselCase, ThermochemicalCatalogue catalogue)
+/// <param name="withoutMetal">True to leave the metal out: more oxygen was charged than a metal can live with.</param>
+internal sealed class VesselAssembler(VesselCase vesselCase, ThermochemicalCatalogue catalogue, bool withoutMetal = false)
 {
     private readonly double temperature = vesselCase.TemperatureKelvin;
     private readonly DatumLedger ledger = new(catalogue, vesselCase.Overrides, vesselCase.TemperatureKelvin);
@@ -100,6 +101,12 @@ internal sealed class VesselAssembler(VesselCase vesselCase, ThermochemicalCatal
         }
 
         var metalExcluded = ExcludeMetal(species, fixedOxygen, family is not null, out failure);
+        if (withoutMetal)
+        {
+            species.RemoveAll(s => s.Phase == PhaseKind.Metal);
+            metalExcluded = true;
+        }
+
         return failure is not null
             ? null
             : Build(account, species, solvent, family, slag?.Terms, fixedOxygen, potential, metalExcluded, present, Split);

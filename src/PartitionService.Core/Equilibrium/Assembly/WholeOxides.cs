@@ -8,11 +8,29 @@ internal static class WholeOxides
 {
     private static readonly Dictionary<string, (string Oxide, double Atoms)> ByElement = new(StringComparer.Ordinal)
     {
-        ["Al"] = ("Al2O3", 2), ["As"] = ("As2O3", 2), ["B"] = ("B2O3", 2), ["Ba"] = ("BaO", 1), ["Bi"] = ("Bi2O3", 2),
-        ["Ca"] = ("CaO", 1), ["Cr"] = ("Cr2O3", 2), ["Cu"] = ("Cu2O", 2), ["Fe"] = ("FeO", 1), ["K"] = ("K2O", 2),
-        ["Li"] = ("Li2O", 2), ["Mg"] = ("MgO", 1), ["Mn"] = ("MnO", 1), ["Na"] = ("Na2O", 2), ["Ni"] = ("NiO", 1),
-        ["P"] = ("P2O5", 2), ["Pb"] = ("PbO", 1), ["Sb"] = ("Sb2O3", 2), ["Si"] = ("SiO2", 1), ["Sn"] = ("SnO2", 1),
-        ["Sr"] = ("SrO", 1), ["Ti"] = ("TiO2", 1), ["Zn"] = ("ZnO", 1),
+        ["Al"] = ("Al2O3", 2),
+        ["As"] = ("As2O3", 2),
+        ["B"] = ("B2O3", 2),
+        ["Ba"] = ("BaO", 1),
+        ["Bi"] = ("Bi2O3", 2),
+        ["Ca"] = ("CaO", 1),
+        ["Cr"] = ("Cr2O3", 2),
+        ["Cu"] = ("Cu2O", 2),
+        ["Fe"] = ("FeO", 1),
+        ["K"] = ("K2O", 2),
+        ["Li"] = ("Li2O", 2),
+        ["Mg"] = ("MgO", 1),
+        ["Mn"] = ("MnO", 1),
+        ["Na"] = ("Na2O", 2),
+        ["Ni"] = ("NiO", 1),
+        ["P"] = ("P2O5", 2),
+        ["Pb"] = ("PbO", 1),
+        ["Sb"] = ("Sb2O3", 2),
+        ["Si"] = ("SiO2", 1),
+        ["Sn"] = ("SnO2", 1),
+        ["Sr"] = ("SrO", 1),
+        ["Ti"] = ("TiO2", 1),
+        ["Zn"] = ("ZnO", 1),
     };
 
     /// <summary>Composition of amounts in mol; null where none of the elements has a whole oxide here.</summary>

@@ -36,7 +36,7 @@ internal static class ChargeReader
         {
             if (!elements.ContainsKey(symbol))
             {
-                problem = $"holds {symbol}, which the catalogue does not know";
+                problem = $"must hold only elements that the catalogue knows; {symbol} is none of them";
                 return false;
             }
         }

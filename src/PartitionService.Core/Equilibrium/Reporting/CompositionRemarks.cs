@@ -50,13 +50,15 @@ internal static class CompositionRemarks
         var fractions = assembled.MetalSolutes.Select(s => Math.Min(1, context.State.MoleFraction[s])).ToArray();
         foreach (var (first, second, strength) in assembled.Interactions.BoundedPairs(fractions))
         {
-            var names = (assembled.Species[assembled.MetalSolutes[first]].Name, assembled.Species[assembled.MetalSolutes[second]].Name);
+            // Slots hold the names in ordinal order.
+            string[] names = [assembled.Species[assembled.MetalSolutes[first]].Name, assembled.Species[assembled.MetalSolutes[second]].Name];
+            Array.Sort(names, StringComparer.Ordinal);
             yield return new Remark(
                 RemarkCode.InteractionBounded,
                 Severity.Note,
-                names.Item1,
-                $"interaction/{context.Assembly.Solvent}/{names.Item1}/{names.Item2}",
-                $"The interaction of {names.Item1} and {names.Item2} is beyond the range of a first-order parameter (|epsilon x| = {RemarkRules.Short(strength)}); it was bounded.",
+                names[0],
+                $"interaction/{context.Assembly.Solvent}/{names[0]}/{names[1]}",
+                $"The interaction of {names[0]} and {names[1]} is beyond the range of a first-order parameter (|epsilon x| = {RemarkRules.Short(strength)}); it was bounded.",
                 [new RemarkNumber("epsilon_times_x", strength, "1")]);
         }
     }
@@ -76,7 +78,7 @@ internal static class CompositionRemarks
                 term.Row!.Element,
                 term.Slot,
                 $"The composition term of {term.Species} in {family.Name} slag was held at the edge of the family's window.",
-                [new RemarkNumber("variable", term.Variable ?? double.NaN, "1")]);
+                term.Variable is { } variable ? [new RemarkNumber("variable", variable, "1")] : []);
         }
 
         if (terms.OpticalBasicity is { } basicity && basicity is < 0.6 or > 0.85)

@@ -11,6 +11,12 @@ internal static class ReducedNewton
     private const double LargestPotentialStep = 2.5;
     private const double LargestAmountStep = 2.5;
 
+    /// <summary>
+    /// Relative addition to the diagonal of the amounts. With fewer components than phases (one metal under slag and gas at a fixed
+    /// oxygen potential) the amounts' block is singular; this much above rounding makes the step shrink the phases whose sum is below 1.
+    /// </summary>
+    private const double PhaseRegularisation = 1e-12;
+
     /// <summary>Iterates from the state of <paramref name="work"/>.</summary>
     /// <param name="problem">The problem.</param>
     /// <param name="work">State and buffers; references must be set.</param>
@@ -175,6 +181,11 @@ internal static class ReducedNewton
                 work.Matrix[(row * Stride) + column] = work.Hessian[(border * Stride) + work.Unknown[column]];
             }
 
+            if (border >= problem.LinkCount)
+            {
+                work.Matrix[(row * Stride) + row] *= 1 + PhaseRegularisation;
+            }
+
             work.Step[row] = RightSide(problem, work, border);
         }
 
@@ -230,7 +241,7 @@ internal static class ReducedNewton
             var next = amount * Math.Exp(exponent);
             largest = Math.Max(largest, Math.Abs(exponent));
             shrinking[phase] = exponent <= -LargestAmountStep && work.PhaseSum[phase] < 1 ? shrinking[phase] + 1 : 0;
-            if (shrinking[phase] >= 2 && !required[phase])
+            if (shrinking[phase] >= 2 && !required[phase] && !IsOnly(problem, work, phase))
             {
                 work.Present[phase] = false;
                 next = 0;
@@ -240,5 +251,19 @@ internal static class ReducedNewton
         }
 
         return largest;
+    }
+
+    /// <summary>True where no other phase is present: something has to hold the elements.</summary>
+    private static bool IsOnly(EquilibriumProblem problem, SolverWorkspace work, int phase)
+    {
+        for (var other = 0; other < problem.PhaseCount; other++)
+        {
+            if (other != phase && work.Present[other])
+            {
+                return false;
+            }
+        }
+
+        return true;
     }
 }
