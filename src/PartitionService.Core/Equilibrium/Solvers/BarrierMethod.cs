@@ -11,6 +11,9 @@ internal static class BarrierMethod
 {
     private const int Stride = SolverWorkspace.MaximumBorder;
 
+    /// <summary>Share of all atoms below which the barrier decides nothing any more.</summary>
+    private const double NearEnough = 1e-8;
+
     /// <summary>Why the method ended.</summary>
     public enum Stop
     {
@@ -49,6 +52,12 @@ internal static class BarrierMethod
         for (var mu = 0.1 * total; mu > 1e-16 * total; mu *= 0.03)
         {
             var stop = MinimiseAmounts(problem, work, mu, 1e12 * total, out culprit, ref iterations, cancellation);
+            if (stop == Stop.Stalled && mu < NearEnough * total)
+            {
+                // Rounding of the sums ends the path; Newton's method takes it from here.
+                break;
+            }
+
             if (stop != Stop.Converged)
             {
                 return stop;
@@ -57,8 +66,8 @@ internal static class BarrierMethod
 
         for (var phase = 0; phase < problem.PhaseCount; phase++)
         {
-            // At the end N (1 - sum x) = mu: a phase with a clear deficit is absent.
-            if (1 - work.PhaseSum[phase] > 1e-4)
+            // On the path N (1 - sum x) = mu: of a phase that is absent the amount vanishes, of one that is present the deficit does.
+            if (1 - work.PhaseSum[phase] > work.PhaseAmount[phase] / total)
             {
                 work.Present[phase] = false;
                 work.PhaseAmount[phase] = 0;
