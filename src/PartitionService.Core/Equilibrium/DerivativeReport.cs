@@ -44,7 +44,7 @@ public sealed record DerivativeColumn(
 public enum DerivativeOutputKind
 {
     /// <summary>Share of an element that leaves with the metal, allowances included.</summary>
-    MetalFraction,
+    MetalFraction = 1,
 
     /// <summary>Share of an element that leaves with the slag, allowances included.</summary>
     SlagFraction,
@@ -69,7 +69,7 @@ public enum DerivativeOutputKind
 public enum DerivativeParameterKind
 {
     /// <summary>Temperature, kelvin.</summary>
-    Temperature,
+    Temperature = 1,
 
     /// <summary>Total pressure, atm.</summary>
     Pressure,

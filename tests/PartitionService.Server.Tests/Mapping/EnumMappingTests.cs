@@ -16,6 +16,13 @@ public sealed class EnumMappingTests
     public void Severities_map_by_name() => Pairs<Severity, Wire.Severity>(EnumMapping.ToWire);
 
     [Fact]
+    public void Derivative_outputs_map_by_name() => Pairs<DerivativeOutputKind, Wire.DerivativeOutputKind>(EnumMapping.ToWire);
+
+    [Fact]
+    public void Derivative_parameters_map_by_name() =>
+        Pairs<DerivativeParameterKind, Wire.DerivativeParameterKind>(EnumMapping.ToWire);
+
+    [Fact]
     public void Accesses_map_by_name() => Pairs<Access, Wire.Access>(access => EnumMapping.ToWire(access));
 
     [Fact]

@@ -7,6 +7,9 @@ namespace PartitionService.Core.Equilibrium.Assembly;
 /// <summary>Moves the slag constants that depend on composition towards the composition of the solution.</summary>
 internal sealed class SlagIteration
 {
+    /// <summary>Lowest mole fraction of oxide ions that sulfide is exchanged for; a slag has far more.</summary>
+    public const double LeastOxideIons = 1e-12;
+
     private readonly AssembledCase assembled;
     private readonly VesselAssembly assembly;
     private readonly SlagTerms terms;
@@ -103,7 +106,7 @@ internal sealed class SlagIteration
         }
 
         var dilute = lnK - problem.LnK[sulfide] + Math.Log(Math.Max(work.MoleFraction[sulfide], 1e-300));
-        return Math.Log(1 + Math.Exp(Math.Min(dilute - Math.Log(Math.Max(oxygen, 1e-12)), 600)));
+        return Math.Log(1 + Math.Exp(Math.Min(dilute - Math.Log(Math.Max(oxygen, LeastOxideIons)), 600)));
     }
 
     private IEnumerable<(string Element, double Mol)> Amounts(SolverWorkspace work)

@@ -19,12 +19,23 @@ internal sealed class VesselAssembler(VesselCase vesselCase, ThermochemicalCatal
     {
         var family = vesselCase.SlagFamily is { } name ? catalogue.SlagFamilies[name] : null;
         var index = SlagIndex.For(catalogue);
+        var hasSlagSpecies = new Dictionary<string, bool>(StringComparer.Ordinal);
         ChargeAccount Split(IEnumerable<ChargeItem> items) => ChargeAccount.Split(
             items.Select(item => ChargeReader.Read(item, catalogue.Elements)),
             vesselCase.Allowances,
             family is not null,
-            element => family is not null && index.Oxides(family.Name, element, ledger).Any(),
+            HasSlagSpecies,
             index.UsualOxygen);
+        bool HasSlagSpecies(string element)
+        {
+            if (!hasSlagSpecies.TryGetValue(element, out var has))
+            {
+                hasSlagSpecies[element] = has = family is not null && index.Oxides(family.Name, element, ledger).Any();
+            }
+
+            return has;
+        }
+
         var account = Split(vesselCase.Charge);
         var solvent = SolventSelection.Choose(vesselCase.Solvent, account, catalogue, out failure);
         if (solvent is null)

@@ -82,6 +82,9 @@ internal sealed class CompositionFeedback
         }
     }
 
+    /// <summary>Change of a constant per change of ln of its capacity formula.</summary>
+    public double PerFormula(int species) => slag.Terms.FirstOrDefault(term => term.Species == species)?.PerFormula ?? 1;
+
     /// <summary>Adds the direct change with the stated dissolved oxygen, per mass ppm.</summary>
     public void AddDissolvedOxygen(Perturbation change) => dissolved?.AddMassPpm(change);
 

@@ -13,7 +13,7 @@ internal sealed class CompositionFunctional
     public (int Species, double Weight)[] LnConstants { get; init; } = [];
 
     /// <summary>Index of a link and weight of its potential.</summary>
-    public (int Link, double Weight)? Potential { get; init; }
+    public (int Link, double Weight)[] Potentials { get; init; } = [];
 
     /// <summary>Value for a solved response.</summary>
     public double Value(EquilibriumResponse response, Perturbation change)
@@ -29,7 +29,11 @@ internal sealed class CompositionFunctional
             sum += weight * change.LnK[species];
         }
 
-        sum += LnAmount is { } amount ? amount.Weight * response.Step[amount.Step] : 0;
-        return sum + (Potential is { } potential ? potential.Weight * response.Step[potential.Link] : 0);
+        foreach (var (link, weight) in Potentials)
+        {
+            sum += weight * response.Step[link];
+        }
+
+        return sum + (LnAmount is { } amount ? amount.Weight * response.Step[amount.Step] : 0);
     }
 }

@@ -185,7 +185,7 @@ internal sealed class ParameterList(
     {
         foreach (var s in users)
         {
-            change.AddLnK(s, LnKPerUnit(slot, assembled.Species[s]));
+            change.AddLnK(s, LnKPerUnit(slot, s));
         }
 
         foreach (var (name, perUnit) in assembly.Potential?.PerDatum ?? [])
@@ -197,11 +197,11 @@ internal sealed class ParameterList(
     }
 
     /// <summary>Change of ln K with the value of a datum: ln gamma, Gibbs energy in J/mol, log10 of a capacity.</summary>
-    private double LnKPerUnit(string slot, SpeciesRecord species) => slot.AsSpan(0, slot.IndexOf('/')) switch
+    private double LnKPerUnit(string slot, int species) => slot.AsSpan(0, slot.IndexOf('/')) switch
     {
         "metal" => -1,
-        "slag" => species.HasProductDatum ? 1 : -1,
-        "capacity" => Math.Log(10),
+        "slag" => assembled.Species[species].HasProductDatum ? 1 : -1,
+        "capacity" => Math.Log(10) * feedback.PerFormula(species),
         _ => -1 / (PhysicalConstants.GasConstant * vesselCase.TemperatureKelvin),
     };
 }

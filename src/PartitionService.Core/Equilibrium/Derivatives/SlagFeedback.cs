@@ -55,15 +55,20 @@ internal sealed class SlagFeedback
     /// <param name="Functional">Differential of the constant with respect to the solution.</param>
     /// <param name="PerInertMol">Derivative with respect to each element of the inert part of the slag, per mol.</param>
     /// <param name="PerKelvin">Derivative of its formula with respect to temperature, per kelvin; zero where the record has it.</param>
+    /// <param name="PerFormula">Change of the constant per change of ln of its formula: below 1 where sulfide fills the slag.</param>
     internal sealed record Term(
-        int Species, CompositionFunctional Functional, IReadOnlyDictionary<string, double> PerInertMol, double PerKelvin);
+        int Species,
+        CompositionFunctional Functional,
+        IReadOnlyDictionary<string, double> PerInertMol,
+        double PerKelvin,
+        double PerFormula);
 
     private Term Make(SlagTerms.Term term)
     {
         var perPercent = new Dictionary<string, double>(StringComparer.Ordinal);
         var fractions = new List<(int Species, double Weight)>();
         var constants = new List<(int Species, double Weight)>();
-        (int Link, double Weight)? potential = null;
+        (int Link, double Weight)[] potentials = [];
         var perKelvin = 0.0;
         switch (term.Kind)
         {
@@ -88,7 +93,7 @@ internal sealed class SlagFeedback
                 AddCations(perPercent);
                 AddPhosphorus(perPercent);
                 AddMetal(fractions, constants);
-                potential = assembly.Assembled.OxygenLink >= 0 ? (assembly.Assembled.OxygenLink, -2.5) : null;
+                potentials = assembly.Assembled.OxygenLink >= 0 ? [(assembly.Assembled.OxygenLink, -2.5)] : [];
                 perKelvin = PhosphorusPartition.Log10PerKelvin(temperature) * Math.Log(10);
                 break;
         }
@@ -110,9 +115,51 @@ internal sealed class SlagFeedback
             LnFractions = [.. fractions],
             LnAmount = (assembly.Assembled.Problem.LinkCount + assembly.Assembled.Problem.SlagPhase, scale),
             LnConstants = [.. constants],
-            Potential = potential,
+            Potentials = potentials,
         };
-        return new Term(term.Index, functional, inert, perKelvin);
+        var made = new Term(term.Index, functional, inert, perKelvin, 1);
+        return term.Kind == SlagTerms.TermKind.Sulfide ? Exchange(made) : made;
+    }
+
+    /// <summary>
+    /// A sulfide ion takes the place of one of the x_O oxide ions: x_S = K a (1 - x_S/x_O). With s = x_S/x_O the constant k of x_S = k a
+    /// has d ln k = (1 - s) d ln K - s (d ln a - d ln x_O).
+    /// </summary>
+    private Term Exchange(Term formula)
+    {
+        var assembled = assembly.Assembled;
+        var problem = assembled.Problem;
+        var slagAmount = response.PhaseAmount[problem.SlagPhase];
+        var atoms = problem.LinkAtoms[assembled.OxygenLink];
+        var inert = assembly.Account.Inert["O"] / slagAmount;
+        var oxides = Enumerable.Range(0, problem.SpeciesCount)
+            .Where(s => problem.Phase[s] == problem.SlagPhase && s != formula.Species && atoms[s] != 0).ToArray();
+        var oxygen = inert + oxides.Sum(s => atoms[s] * response.Fraction(s));
+        var bounded = Math.Max(oxygen, SlagIteration.LeastOxideIons);
+        var share = response.Fraction(formula.Species) / bounded;
+        var perOxygen = oxygen > SlagIteration.LeastOxideIons ? share / oxygen : 0;
+        var functional = formula.Functional;
+        var (step, amount) = functional.LnAmount!.Value;
+        var perInert = formula.PerInertMol.ToDictionary(
+            entry => entry.Key,
+            entry => ((1 - share) * entry.Value) + (entry.Key == "O" ? perOxygen / slagAmount : 0),
+            StringComparer.Ordinal);
+        return formula with
+        {
+            Functional = new CompositionFunctional
+            {
+                LnFractions =
+                [
+                    .. functional.LnFractions.Select(entry => (entry.Species, (1 - share) * entry.Weight)),
+                    .. oxides.Select(s => (s, perOxygen * atoms[s] * response.Fraction(s))),
+                ],
+                LnAmount = (step, ((1 - share) * amount) - (perOxygen * inert)),
+                Potentials = [(Array.IndexOf(assembled.Links, "S"), -share), (assembled.OxygenLink, share)],
+            },
+            PerInertMol = perInert,
+            PerKelvin = (1 - share) * formula.PerKelvin,
+            PerFormula = 1 - share,
+        };
     }
 
     /// <summary>From independent mass % to mol of an element: the mass % of all oxides together stay 100.</summary>

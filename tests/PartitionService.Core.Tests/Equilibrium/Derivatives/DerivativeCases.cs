@@ -54,6 +54,32 @@ public static class DerivativeCases
                 new("S", 0.2),
             ],
         },
+        ["steel, slag full of sulfide"] = () => Steel(new OxygenStatement.Pressure(-12), "ladle-lime-alumina", false) with
+        {
+            Charge =
+            [
+                new("Fe", 1000), new("Mn", 4), new("Cr", 1), new("FeS", 60), new("CaO", 60), new("Al2O3", 30), new("SiO2", 8),
+                new("MgO", 5), new("CaF2", 4),
+            ],
+        },
+        ["iron saturated with carbon"] = () => Steel(new OxygenStatement.Closed(), "lime-silica-alumina", true) with
+        {
+            TemperatureKelvin = 1823,
+            Charge =
+            [
+                new("Fe", 1000), new("C", 80), new("Si", 4), new("Mn", 4), new("Cu", 2), new("Sn", 0.3), new("FeS", 2), new("CaO", 60),
+                new("SiO2", 50), new("Al2O3", 20), new("MgO", 8), new("O2", 5),
+            ],
+        },
+        ["copper blown into the slag, closed"] = () => BlackCopper(new OxygenStatement.Closed()) with
+        {
+            Solvent = "Cu",
+            Charge =
+            [
+                new("Cu", 20), new("Ni", 2), new("Sn", 1), new("FeO", 250), new("SiO2", 130), new("CaO", 20), new("O2", 60),
+                new("N2", 30, ChargeUnit.NormalCubicMetre),
+            ],
+        },
         ["lead softening, gas never forms"] = () => new VesselCase
         {
             TemperatureKelvin = 1023,
