@@ -76,7 +76,7 @@ internal static class CompositionRemarks
                 term.Row!.Element,
                 term.Slot,
                 $"The composition term of {term.Species} in {family.Name} slag was held at the edge of the family's window.",
-                [new RemarkNumber("variable", term.Variable ?? double.NaN, "1")]);
+                term.Variable is { } variable ? [new RemarkNumber("variable", variable, "1")] : []);
         }
 
         if (terms.OpticalBasicity is { } basicity && basicity is < 0.6 or > 0.85)

@@ -101,7 +101,7 @@ internal static class DatumRemarks
                         ElementOf(context, slot),
                         slot,
                         $"{use.Quantity} is assumed so that the direction is right; do not use the figure.",
-                        [new RemarkNumber("sigma", use.Sigma ?? double.NaN, use.Unit)]);
+                        use.Sigma is { } sigma ? [new RemarkNumber("sigma", sigma, use.Unit)] : []);
                 }
 
                 var flags = use.Flags.Where(flag => !QuietFlags.Contains(flag)).ToArray();
