@@ -75,7 +75,7 @@ public static partial class CaseFileMutator
     }
 
     /// <summary>Files that are hostile as a whole; the huge ones seldom, they take their time to write.</summary>
-    private static string Whole(Dice dice) => dice.Throw(dice.OnceIn(12) ? 14 : 6) switch
+    private static string Whole(Dice dice) => dice.Throw(dice.OnceIn(25) ? 14 : 6) switch
     {
         0 => Encoding.Latin1.GetString(dice.Bytes(dice.Throw(2000))),
         1 => HostileTexts.Letters(dice),

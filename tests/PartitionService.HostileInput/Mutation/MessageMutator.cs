@@ -22,7 +22,7 @@ public static class MessageMutator
                 field.Accessor.SetValue(owner, HostileNumbers.Within(field.Name, dice));
             else if (field.FieldType == FieldType.String)
                 field.Accessor.SetValue(owner, Vocabulary.Known(field.Name, dice));
-            else if (field.MessageType is { Name: "OxygenStatement" })
+            else if (field.FieldType == FieldType.Message && field.MessageType.Name == "OxygenStatement")
                 field.Accessor.SetValue(owner, New(field, dice));
         }
     }

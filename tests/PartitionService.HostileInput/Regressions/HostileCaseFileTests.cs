@@ -34,7 +34,7 @@ public sealed class HostileCaseFileTests
         var errors = ErrorsOf(string.Concat(Enumerable.Repeat("charg: 1\n", 100_000)));
         Assert.Equal(CaseFileReader.MostErrors + 1, errors.Count);
         Assert.Equal("99903 further errors are not listed; mend these first.", errors[^1].Message);
-        Assert.True(clock.Elapsed < TimeSpan.FromSeconds(20), $"took {clock.Elapsed}");
+        Assert.True(clock.Elapsed < TimeSpan.FromSeconds(30), $"took {clock.Elapsed}");
     }
 
     private static IReadOnlyList<CaseFileError> ErrorsOf(string text) =>
