@@ -80,6 +80,11 @@ public static class PartitionServer
         services.AddGrpc(grpc =>
         {
             grpc.MaxReceiveMessageSize = options.MaxReceiveMessageBytes;
+            grpc.CompressionProviders =
+            [
+                new BoundedCompression(BoundedCompression.Gzip, options.MaxReceiveMessageBytes),
+                new BoundedCompression(BoundedCompression.Deflate, options.MaxReceiveMessageBytes),
+            ];
             grpc.EnableDetailedErrors = false;
             grpc.Interceptors.Add<ErrorInterceptor>();
         });

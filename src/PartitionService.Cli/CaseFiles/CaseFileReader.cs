@@ -12,6 +12,9 @@ internal static class CaseFileReader
     /// <summary>Largest file, bytes.</summary>
     internal const int LargestFileBytes = 1024 * 1024;
 
+    /// <summary>Most errors that are listed; more would only push the first ones off the screen.</summary>
+    internal const int MostErrors = 100;
+
     /// <summary>Absolute zero on the other scale: 0 degC in kelvin.</summary>
     internal const double KelvinAtZeroCelsius = 273.15;
 
@@ -82,8 +85,16 @@ internal static class CaseFileReader
         }
 
         if (errors.Count > 0)
-            throw new CaseFileException(file, [.. errors.OrderBy(error => error.Line).ThenBy(error => error.Column)]);
+            throw new CaseFileException(file, InOrder(errors));
         return new CaseFile(file, vesselCase, places);
+    }
+
+    private static List<CaseFileError> InOrder(List<CaseFileError> errors)
+    {
+        List<CaseFileError> shown = [.. errors.OrderBy(error => error.Line).ThenBy(error => error.Column).Take(MostErrors)];
+        if (errors.Count > MostErrors)
+            shown.Add(new CaseFileError(0, 0, "", FormattableString.Invariant($"{errors.Count - MostErrors} further errors are not listed; mend these first.")));
+        return shown;
     }
 
     private static CaseFileException Refuse(string file, string message) => new(file, [new CaseFileError(0, 0, "", message)]);

@@ -20,13 +20,23 @@ internal sealed class CaseTreeReader
     /// <exception cref="CaseTreeException">The text is not YAML, or uses what is refused.</exception>
     public static CaseNode Read(string text)
     {
+        var reader = new CaseTreeReader(text);
         try
         {
-            return new CaseTreeReader(text).ReadDocument();
+            return reader.ReadDocument();
         }
         catch (YamlException fault)
         {
             throw new CaseTreeException((int)fault.Start.Line, (int)fault.Start.Column, "This is not valid YAML: " + fault.Message);
+        }
+        catch (Exception fault) when (fault is InvalidOperationException or ArgumentException)
+        {
+            // The library gives up on some damaged text without a word or a place; what it read last stands just before.
+            var last = reader.parser.Current?.End;
+            throw new CaseTreeException(
+                Math.Max(1, (int)(last?.Line ?? 1)),
+                Math.Max(1, (int)(last?.Column ?? 1)),
+                "This is not valid YAML: what follows here cannot be read. Close quotation marks and brackets on the line they start on.");
         }
     }
 

@@ -20,12 +20,12 @@ internal static class NumberReader
             return true;
         fault = (isNumber, text) switch
         {
-            (true, _) => $"\"{text}\" is not a finite number.",
+            (true, _) => $"{Quoted.Of(text)} is not a finite number.",
             (_, ".nan" or ".NaN" or ".NAN" or ".inf" or "-.inf" or "+.inf" or ".Inf" or "-.Inf" or ".INF" or "-.INF") =>
-                $"\"{text}\" is not a finite number.",
+                $"{Quoted.Of(text)} is not a finite number.",
             _ when text.Contains(',') =>
-                $"\"{text}\" is not a number; write the decimal mark as a point and leave out group marks, for example 1.5.",
-            _ => $"\"{text}\" is not a number.",
+                $"{Quoted.Of(text)} is not a number; write the decimal mark as a point and leave out group marks, for example 1.5.",
+            _ => $"{Quoted.Of(text)} is not a number.",
         };
         return false;
     }

@@ -97,7 +97,7 @@ internal sealed class Section
             return null;
         if (scalar.Quoted)
         {
-            Report(scalar, key, $"\"{scalar.Text}\" is text; write the number without quotation marks.");
+            Report(scalar, key, $"{Quoted.Of(scalar.Text)} is text; write the number without quotation marks.");
             return null;
         }
 
@@ -132,7 +132,7 @@ internal sealed class Section
             return null;
         if (scalar is { Quoted: false, Text: "true" or "false" })
             return scalar.Text == "true";
-        Report(scalar, key, $"\"{scalar.Text}\" is neither true nor false.");
+        Report(scalar, key, $"{Quoted.Of(scalar.Text)} is neither true nor false.");
         return null;
     }
 
@@ -191,10 +191,12 @@ internal sealed class Section
     {
         if (!allowed.Contains(key.Text))
         {
-            var hint = NearestWord.Find(key.Text, allowed) is { } nearest
+            // Guessing costs time, which a file of nothing but unknown keys would multiply; nobody reads a guess that is not shown.
+            var guess = errors.Count < CaseFileReader.MostErrors ? NearestWord.Find(key.Text, allowed) : null;
+            var hint = guess is { } nearest
                 ? $"did you mean \"{nearest}\"?"
                 : allowed.Length == 0 ? "no keys are known here, write {}." : $"known keys: {string.Join(", ", allowed)}.";
-            errors.Add(new CaseFileError(key.Line, key.Column, words, $"Unknown key \"{key.Text}\"; {hint}"));
+            errors.Add(new CaseFileError(key.Line, key.Column, words, $"Unknown key {Quoted.Of(key.Text)}; {hint}"));
         }
         else if (!entries.TryAdd(key.Text, (key, value)))
         {

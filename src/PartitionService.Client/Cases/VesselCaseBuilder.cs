@@ -44,7 +44,7 @@ public sealed class VesselCaseBuilder
 
     /// <summary>Charges a mass of a substance; charging a formula again adds to it.</summary>
     /// <param name="formula">Chemical formula, for example <c>Cu</c>, <c>PbO</c> or <c>air</c>.</param>
-    /// <param name="kg">Mass in kg, in [0, 1e9].</param>
+    /// <param name="kg">Mass in kg, 0 or in [1e-27, 1e9].</param>
     /// <returns>This builder.</returns>
     public VesselCaseBuilder Charge(string formula, double kg)
     {
@@ -55,7 +55,7 @@ public sealed class VesselCaseBuilder
 
     /// <summary>Blows in a volume of a gas.</summary>
     /// <param name="formula">Formula of a gas, for example <c>O2</c> or <c>CH4</c>, or <c>air</c>.</param>
-    /// <param name="normalCubicMetres">Volume in normal cubic metres (0 degC, 1 atm, ideal), in [0, 1e9].</param>
+    /// <param name="normalCubicMetres">Volume in normal cubic metres (0 degC, 1 atm, ideal), 0 or in [1e-27, 1e9].</param>
     /// <returns>This builder.</returns>
     public VesselCaseBuilder Blow(string formula, double normalCubicMetres)
     {

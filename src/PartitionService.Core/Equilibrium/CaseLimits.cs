@@ -27,6 +27,9 @@ public static class CaseLimits
     /// <summary>Highest total pressure in atm.</summary>
     public const double MaximumPressureAtm = 100;
 
+    /// <summary>Smallest quantity of one item beside 0, kg or Nm3: below the mass of one atom, so that less has no meaning.</summary>
+    public const double MinimumQuantity = 1e-27;
+
     /// <summary>Largest quantity of one item, kg or Nm3.</summary>
     public const double MaximumQuantity = 1e9;
 }

@@ -60,10 +60,10 @@ public static class CaseValidation
             switch (item.Unit)
             {
                 case ChargeUnit.Kilogram:
-                    check.Range($"{path}.mass_kg", item.Quantity, 0, CaseLimits.MaximumQuantity);
+                    check.Quantity($"{path}.mass_kg", item.Quantity);
                     break;
                 case ChargeUnit.NormalCubicMetre:
-                    check.Range($"{path}.volume_normal_cubic_metre", item.Quantity, 0, CaseLimits.MaximumQuantity);
+                    check.Quantity($"{path}.volume_normal_cubic_metre", item.Quantity);
                     if (known && !GasFormulas.Contains(item.Formula))
                     {
                         check.Add(

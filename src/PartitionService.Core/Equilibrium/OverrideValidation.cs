@@ -55,13 +55,7 @@ internal static class OverrideValidation
 
         if (item.Kind != kind)
         {
-            var wanted = kind switch
-            {
-                OverrideKind.LnGamma => "ln_gamma",
-                OverrideKind.Epsilon => "epsilon",
-                _ => "gibbs_energy_joule_per_mol",
-            };
-            check.Add(path, item.Kind == OverrideKind.Unstated ? "" : item.Kind.ToString(), $"needs {wanted} for slot {item.Slot}");
+            check.Add(path, FieldOf(item.Kind), $"needs {FieldOf(kind)} for slot {item.Slot}");
             return;
         }
 
@@ -78,6 +72,15 @@ internal static class OverrideValidation
                 break;
         }
     }
+
+    /// <summary>Name of the field of a request; empty where none was sent.</summary>
+    private static string FieldOf(OverrideKind kind) => kind switch
+    {
+        OverrideKind.LnGamma => "ln_gamma",
+        OverrideKind.Epsilon => "epsilon",
+        OverrideKind.GibbsEnergy => "gibbs_energy_joule_per_mol",
+        _ => "",
+    };
 
     private static bool IsKnown(string[] parts, string slot, ThermochemicalCatalogue catalogue)
     {

@@ -25,6 +25,15 @@ internal sealed class ViolationList
         }
     }
 
+    /// <summary>Adds a violation where a quantity of the charge is neither 0 nor in its range.</summary>
+    public void Quantity(string field, double value)
+    {
+        if (value != 0 && !(value >= CaseLimits.MinimumQuantity && value <= CaseLimits.MaximumQuantity))
+        {
+            Add(field, Text(value), $"must be 0 or a number in [{Text(CaseLimits.MinimumQuantity)}, {Text(CaseLimits.MaximumQuantity)}]");
+        }
+    }
+
     /// <summary>Adds a violation where a text is too long.</summary>
     public void Length(string field, string value, int maximum)
     {

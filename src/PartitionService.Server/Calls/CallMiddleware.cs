@@ -1,8 +1,8 @@
 using System.Diagnostics;
 using System.Globalization;
+using Google.Protobuf;
 using Grpc.Core;
 using Microsoft.AspNetCore.Http.Features;
-using PartitionService.Contracts.V1;
 using PartitionService.Server.Errors;
 using PartitionService.Server.Log;
 
@@ -33,22 +33,38 @@ internal sealed class CallMiddleware(RequestDelegate next, ILogger<CallMiddlewar
         {
             // An early refusal consists of headers alone, which leave only after this method: they can still be added to.
             if (!http.Response.HasStarted)
-                ExplainMessageTooLarge(http, record);
+                ExplainEarlyRefusal(http, record);
             Log(http, record, Stopwatch.GetElapsedTime(start));
         }
     }
 
     /// <summary>Adds the reason to a refusal that the framework makes before any handler runs.</summary>
-    private static void ExplainMessageTooLarge(HttpContext http, CallRecord record)
+    private static void ExplainEarlyRefusal(HttpContext http, CallRecord record)
     {
         var headers = http.Response.Headers;
-        var exhausted = ((int)StatusCode.ResourceExhausted).ToString(CultureInfo.InvariantCulture);
-        if (record.Status is not null || headers[StatusHeader] != exhausted || headers.ContainsKey(DetailsHeader))
+        var method = MethodName(http);
+        if (record.Status is not null
+            || headers.ContainsKey(DetailsHeader)
+            || !method.StartsWith(ServiceMethods.Prefix, StringComparison.Ordinal)
+            || !int.TryParse(headers[StatusHeader], NumberStyles.None, CultureInfo.InvariantCulture, out var status))
+        {
             return;
-        record.Status = StatusCode.ResourceExhausted;
-        record.Reason = ServiceErrors.ReasonName(ErrorReason.MessageTooLarge);
-        var message = Uri.UnescapeDataString(headers[MessageHeader].ToString());
-        headers[DetailsHeader] = ServiceErrors.MessageTooLargeDetails(record.RequestId, message);
+        }
+
+        // Whatever else fails inside the service has a status of its own by now: this is a message that could not be read.
+        var error = (StatusCode)status switch
+        {
+            StatusCode.ResourceExhausted => ServiceErrors.MessageTooLarge(Uri.UnescapeDataString(headers[MessageHeader].ToString())),
+            StatusCode.Unknown or StatusCode.Internal => ServiceErrors.UnreadableMessage(method),
+            _ => null,
+        };
+        if (error is null)
+            return;
+        record.Status = error.Status;
+        record.Reason = ServiceErrors.ReasonName(error.Reason);
+        headers[StatusHeader] = ((int)error.Status).ToString(CultureInfo.InvariantCulture);
+        headers[MessageHeader] = Uri.EscapeDataString(error.Message);
+        headers[DetailsHeader] = ServiceErrors.ToStatus(error, record.RequestId).ToByteString().ToBase64();
     }
 
     private void Log(HttpContext http, CallRecord record, TimeSpan duration)

@@ -1,4 +1,3 @@
-using Google.Protobuf;
 using Google.Protobuf.WellKnownTypes;
 using Google.Rpc;
 using Grpc.Core;
@@ -69,11 +68,16 @@ internal static class ServiceErrors
         return status;
     }
 
-    /// <summary>Details of a message that was larger than the limit, base64 for the trailer that carries them.</summary>
-    public static string MessageTooLargeDetails(string requestId, string message) =>
-        ToStatus(new ServiceException(StatusCode.ResourceExhausted, ErrorReason.MessageTooLarge, message), requestId)
-            .ToByteString()
-            .ToBase64();
+    /// <summary>RESOURCE_EXHAUSTED for a message beyond the limit, in the framework's words.</summary>
+    public static ServiceException MessageTooLarge(string message) =>
+        new(StatusCode.ResourceExhausted, ErrorReason.MessageTooLarge, message);
+
+    /// <summary>INVALID_ARGUMENT for bytes that are no message.</summary>
+    public static ServiceException UnreadableMessage(string method) =>
+        new(
+            StatusCode.InvalidArgument,
+            ErrorReason.UnreadableMessage,
+            $"The bytes are no request of {method}: they are damaged, cut short, or of another contract.");
 
     /// <summary>Name of a reason as it is sent: upper case, without the prefix.</summary>
     public static string ReasonName(ErrorReason reason)

@@ -19,6 +19,12 @@ public sealed record HostileRequest(string Method, byte[] Bytes)
         var dice = new Dice(seed, number);
         var method = dice.OnceIn(4) ? dice.Of(OtherMethods) : "SolveCharge";
         var message = SeedMessages.For(method, dice);
+        if (method == "SolveCharge" && dice.OnceIn(5))
+        {
+            MessageMutator.ChangeWithinLimits(message, dice);
+            return new HostileRequest(method, message.ToByteArray());
+        }
+
         if (!dice.OnceIn(50))
             MessageMutator.Change(message, dice);
         if (message.Descriptor.FindFieldByName("page_token") is { } token && dice.OnceIn(2))

@@ -9,6 +9,24 @@ public static class MessageMutator
 {
     private const int DeepestPlace = 8;
 
+    /// <summary>Changes one to five numbers and words of a message within what the contract allows, which gets furthest into the solver.</summary>
+    public static void ChangeWithinLimits(IMessage message, Dice dice)
+    {
+        var places = new List<(IMessage Owner, FieldDescriptor Field)>();
+        Collect(message, places, 0);
+        places.RemoveAll(place => place.Field.IsRepeated || (place.Field.HasPresence && !place.Field.Accessor.HasValue(place.Owner)));
+        for (var changes = 1 + dice.Throw(5); changes > 0; changes--)
+        {
+            var (owner, field) = dice.Of(places);
+            if (field.FieldType == FieldType.Double)
+                field.Accessor.SetValue(owner, HostileNumbers.Within(field.Name, dice));
+            else if (field.FieldType == FieldType.String)
+                field.Accessor.SetValue(owner, Vocabulary.Known(field.Name, dice));
+            else if (field.FieldType == FieldType.Message && field.MessageType.Name == "OxygenStatement")
+                field.Accessor.SetValue(owner, New(field, dice));
+        }
+    }
+
     /// <summary>Changes one to five places of a message.</summary>
     public static void Change(IMessage message, Dice dice)
     {

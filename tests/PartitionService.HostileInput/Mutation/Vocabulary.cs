@@ -34,6 +34,17 @@ public static class Vocabulary
         };
     }
 
+    /// <summary>A text for a field that the service knows; the name of a case is left to chance.</summary>
+    public static string Known(string field, Dice dice) => field switch
+    {
+        "formula" or "oxide" => dice.OnceIn(2) ? dice.Of(Substances) : dice.Of(Elements),
+        "element" or "solute" => dice.Of(Elements),
+        "solvent" => dice.Of(Catalogue.Solvents),
+        "family" => dice.Of([.. Catalogue.SlagFamilies.Keys]),
+        "slot" or "slot_prefix" => dice.Of(Slots),
+        _ => "",
+    };
+
     /// <summary>A slot of the catalogue, one that it lacks but allows, or one that it knows nothing of.</summary>
     public static string Slot(Dice dice) => dice.Throw(4) switch
     {

@@ -51,6 +51,7 @@ public sealed class EnumMappingTests
             Wire.ErrorReason.Cancelled,
             Wire.ErrorReason.Internal,
             Wire.ErrorReason.MessageTooLarge,
+            Wire.ErrorReason.UnreadableMessage,
         ];
         var failures = Enum.GetValues<SolveFailure>().Select(FailureMapping.ToReason);
         Assert.Equal(

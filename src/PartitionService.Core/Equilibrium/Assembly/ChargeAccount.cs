@@ -6,6 +6,8 @@ namespace PartitionService.Core.Equilibrium.Assembly;
 /// <remarks>Every atom of the charge is in exactly one of the ledgers; <see cref="Input"/> is their sum.</remarks>
 internal sealed class ChargeAccount
 {
+    private const double SmallestShare = 1e-16;
+
     private ChargeAccount()
     {
     }
@@ -123,8 +125,10 @@ internal sealed class ChargeAccount
 
     private void Place(string element, double amount, double share, ElementLedger outside)
     {
-        Reacting.Add(element, amount * share);
-        outside.Add(element, amount * (1 - share));
+        // Beside the whole a share below its rounding is none; the solver need not look for such traces.
+        var reacting = share < SmallestShare ? 0 : share;
+        Reacting.Add(element, amount * reacting);
+        outside.Add(element, amount * (1 - reacting));
     }
 
     private void Note(ChargeConstituent constituent, string element, double amount)
