@@ -43,8 +43,8 @@ internal sealed class MetalExcess
             double h = 0, dh = 0;
             foreach (var (i, j, epsilon) in pairs)
             {
-                var (a, da) = Bounded(amounts[i] / total, ((i == k ? 1 : 0) - (amounts[i] / total)) / total, epsilon);
-                var (b, db) = Bounded(amounts[j] / total, ((j == k ? 1 : 0) - (amounts[j] / total)) / total, epsilon);
+                var (a, da) = Bounded(amounts[i] / total, ((i == k ? 1 : 0) - (amounts[i] / total)) / total, epsilon, i == j);
+                var (b, db) = Bounded(amounts[j] / total, ((j == k ? 1 : 0) - (amounts[j] / total)) / total, epsilon, i == j);
                 var weight = i == j ? 0.5 * epsilon : epsilon;
                 h += weight * a * b;
                 dh += weight * ((da * b) + (a * db));
@@ -56,12 +56,14 @@ internal sealed class MetalExcess
         return potentials;
     }
 
-    private static (double Value, double Dual) Bounded(double x, double dx, double epsilon)
+    private static (double Value, double Dual) Bounded(double x, double dx, double epsilon, bool self)
     {
-        var strength = Math.Abs(epsilon * x / 2);
+        // The stated bound of the model: 10 for a moderate repulsion of a solute with itself, 2 for all else.
+        var bound = self && epsilon is > 0 and <= 20 ? 10 : 2;
+        var strength = Math.Abs(epsilon * x / bound);
         if (strength > 1e50)
         {
-            return (2 / Math.Abs(epsilon), 0);
+            return (bound / Math.Abs(epsilon), 0);
         }
 
         var root = 1 + Math.Pow(strength, 4);

@@ -16,6 +16,7 @@ internal static class ReducedNewton
     /// oxygen potential) the amounts' block is singular; this much above rounding makes the step shrink the phases whose sum is below 1.
     /// </summary>
     private const double PhaseRegularisation = 1e-12;
+    private const double LinkRegularisation = 1e-14;
 
     /// <summary>Iterates from the state of <paramref name="work"/>.</summary>
     /// <param name="problem">The problem.</param>
@@ -149,6 +150,11 @@ internal static class ReducedNewton
             if (border >= problem.LinkCount)
             {
                 work.Matrix[(row * Stride) + row] *= 1 + PhaseRegularisation;
+            }
+            else
+            {
+                // A component that is bound to the last atom has no curvature left; rounding must not decide its step.
+                work.Matrix[(row * Stride) + row] -= LinkRegularisation * work.LinkGross[border];
             }
 
             work.Step[row] = RightSide(problem, work, border);
