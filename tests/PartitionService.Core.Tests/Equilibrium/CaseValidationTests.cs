@@ -29,22 +29,22 @@ public sealed class CaseValidationTests
         ["charge of zeros"] = (
             Valid with { Charge = [new("Cu", 0), new("Pb", 0)] }, new("charge", "0", "must hold at least one quantity above 0")),
         ["unknown element"] = (
-            Valid.Plus(new ChargeItem("HeO", 1)), new("charge[6].formula", "HeO", "holds He, which the catalogue does not know")),
+            Valid.Plus(new ChargeItem("HeO", 1)), new("charge[6].formula", "HeO", "must hold only elements that the catalogue knows; He is none of them")),
         ["empty formula"] = (
             Valid.Plus(new ChargeItem("", 1)),
             new(
                 "charge[6].formula",
                 "",
                 "must be a chemical formula such as Cu, PbO or Fe2SiO4, or \"air\" (position 1: the formula is empty)")),
-        ["mass negative"] = (Valid.Plus(new ChargeItem("Zn", -1)), new("charge[6].mass_kg", "-1", "must be a number in [0, 1000000000]")),
+        ["mass negative"] = (Valid.Plus(new ChargeItem("Zn", -1)), new("charge[6].mass_kg", "-1", "must be 0 or a number in [1E-27, 1000000000]")),
         ["mass not a number"] = (
-            Valid.Plus(new ChargeItem("Zn", double.NaN)), new("charge[6].mass_kg", "NaN", "must be a number in [0, 1000000000]")),
+            Valid.Plus(new ChargeItem("Zn", double.NaN)), new("charge[6].mass_kg", "NaN", "must be 0 or a number in [1E-27, 1000000000]")),
         ["mass infinite"] = (
             Valid.Plus(new ChargeItem("Zn", double.PositiveInfinity)),
-            new("charge[6].mass_kg", "Infinity", "must be a number in [0, 1000000000]")),
+            new("charge[6].mass_kg", "Infinity", "must be 0 or a number in [1E-27, 1000000000]")),
         ["volume negative"] = (
             Valid.Plus(new ChargeItem("O2", -2, ChargeUnit.NormalCubicMetre)),
-            new("charge[6].volume_normal_cubic_metre", "-2", "must be a number in [0, 1000000000]")),
+            new("charge[6].volume_normal_cubic_metre", "-2", "must be 0 or a number in [1E-27, 1000000000]")),
         ["volume of a solid"] = (
             Valid.Plus(new ChargeItem("PbO", 3, ChargeUnit.NormalCubicMetre)),
             new(

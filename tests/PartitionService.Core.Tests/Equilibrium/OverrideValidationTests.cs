@@ -37,9 +37,9 @@ public sealed class OverrideValidationTests
     [InlineData("interaction/Cu/Pb/O", OverrideKind.Epsilon, 0, "overrides[0].slot", "interaction/Cu/Pb/O", UnknownSlot)]
     [InlineData("capacity/sosinsky-cs", OverrideKind.LnGamma, 0, "overrides[0].slot", "capacity/sosinsky-cs", "must start with metal/, slag/, oxidation/, chloride/, gas/ or interaction/")]
     [InlineData("", OverrideKind.LnGamma, 0, "overrides[0].slot", "", "must start with metal/, slag/, oxidation/, chloride/, gas/ or interaction/")]
-    [InlineData("metal/Cu/Pb", OverrideKind.GibbsEnergy, 0, "overrides[0]", "GibbsEnergy", "needs ln_gamma for slot metal/Cu/Pb")]
-    [InlineData("interaction/Cu/O/Pb", OverrideKind.LnGamma, 0, "overrides[0]", "LnGamma", "needs epsilon for slot interaction/Cu/O/Pb")]
-    [InlineData("oxidation/PbO", OverrideKind.Epsilon, 0, "overrides[0]", "Epsilon", "needs gibbs_energy_joule_per_mol for slot oxidation/PbO")]
+    [InlineData("metal/Cu/Pb", OverrideKind.GibbsEnergy, 0, "overrides[0]", "gibbs_energy_joule_per_mol", "needs ln_gamma for slot metal/Cu/Pb")]
+    [InlineData("interaction/Cu/O/Pb", OverrideKind.LnGamma, 0, "overrides[0]", "ln_gamma", "needs epsilon for slot interaction/Cu/O/Pb")]
+    [InlineData("oxidation/PbO", OverrideKind.Epsilon, 0, "overrides[0]", "epsilon", "needs gibbs_energy_joule_per_mol for slot oxidation/PbO")]
     [InlineData("metal/Cu/Pb", OverrideKind.Unstated, 0, "overrides[0]", "", "needs ln_gamma for slot metal/Cu/Pb")]
     public void Each_rule_reports_exactly_its_violation(
         string slot, OverrideKind kind, double value, string field, string text, string allowed) =>

@@ -11,6 +11,7 @@ namespace PartitionService.Core.Equilibrium.Assembly;
 internal static class ActivityIteration
 {
     private const double LargestMove = 3;
+    private const double LongestSulfideStep = 1e4;
 
     /// <summary>Solves the case.</summary>
     /// <param name="assembly">The case; its ln K of metal and slag species are updated.</param>
@@ -49,6 +50,8 @@ internal static class ActivityIteration
         // Distances of all coefficients from those of the new composition: solutes, solvent, oxygen potential, slag constants.
         var residual = new double[metal.Length + 2 + (slag?.Count ?? 0)];
         var relaxation = new RelaxationFactor();
+        var sulfide = slag is { Sulfide: >= 0 } ? metal.Length + 2 + slag.Sulfide : -1;
+        var sulfideRelaxation = new RelaxationFactor(LongestSulfideStep);
         while (result.Stop == SaddleSolver.Stop.Converged && !settled)
         {
             if (++passes > Convergence.ActivityPassLimit)
@@ -79,8 +82,21 @@ internal static class ActivityIteration
                 break;
             }
 
+            var sulfideMove = 0.0;
+            if (sulfide >= 0)
+            {
+                sulfideRelaxation.Update(residual.AsSpan(sulfide, 1));
+                sulfideMove = Math.Clamp(sulfideRelaxation.Value * residual[sulfide], -LargestMove, LargestMove);
+                residual[sulfide] = 0;
+            }
+
             relaxation.Update(residual);
             Bound(residual, relaxation.Value);
+            if (sulfide >= 0)
+            {
+                residual[sulfide] = sulfideMove;
+            }
+
             for (var i = 0; i < metal.Length; i++)
             {
                 lnGamma[i] += residual[i];

@@ -47,6 +47,12 @@ internal sealed class SlagIteration
         }
     }
 
+    /// <summary>
+    /// Position of the sulfide among the constants; -1 without. Where the slag is the only home of sulfur its amount hardly follows the
+    /// constant, so it needs steps of its own length.
+    /// </summary>
+    public int Sulfide => terms.All.ToList().FindIndex(term => term.Kind == SlagTerms.TermKind.Sulfide && term.Index >= 0);
+
     /// <summary>Number of constants; the length of the distances.</summary>
     public int Count => terms.All.Count;
 

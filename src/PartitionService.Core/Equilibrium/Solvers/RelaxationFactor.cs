@@ -5,10 +5,10 @@ namespace PartitionService.Core.Equilibrium.Solvers;
 /// Aitken's rule for vectors (Irons and Tuck, Int. J. Numer. Methods Eng. 1 (1969) 275): omega_(k+1) = -omega_k r_k.(r_(k+1) - r_k) /
 /// |r_(k+1) - r_k|^2. It shortens steps that overshoot and lengthens steps that creep; bounds keep one bad pair of residuals harmless.
 /// </remarks>
-internal sealed class RelaxationFactor
+/// <param name="longest">longest step.</param>
+internal sealed class RelaxationFactor(double longest = 20)
 {
     private const double Shortest = 0.05;
-    private const double Longest = 20;
     private const double LargestGrowth = 3;
 
     private double[] last = [];
@@ -30,11 +30,11 @@ internal sealed class RelaxationFactor
                 square += change * change;
             }
 
-            var next = square > 0 ? -Value * along / square : Longest;
+            var next = square > 0 ? -Value * along / square : longest;
 
             // A negative value means that the residual grows in its own direction: keep the direction and grow the step.
             var wanted = next > 0 ? next : LargestGrowth * Value;
-            Value = Math.Clamp(Math.Min(wanted, LargestGrowth * Value), Shortest, Longest);
+            Value = Math.Clamp(Math.Min(wanted, LargestGrowth * Value), Shortest, longest);
         }
 
         if (last.Length != residual.Length)

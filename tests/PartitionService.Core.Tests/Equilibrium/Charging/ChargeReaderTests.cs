@@ -64,7 +64,7 @@ public sealed class ChargeReaderTests
     {
         Assert.False(ChargeReader.TryResolve("He2O3", Vessels.Catalogue.Elements, out var atoms, out var problem));
         Assert.Null(atoms);
-        Assert.Equal("holds He, which the catalogue does not know", problem);
+        Assert.Equal("must hold only elements that the catalogue knows; He is none of them", problem);
     }
 
     [Fact]

@@ -19,7 +19,8 @@ public sealed class RandomCaseTests(ITestOutputHelper output)
         output.WriteLine(tally.Summary());
         Assert.True(tally.Faults.IsEmpty, tally.FaultText());
         Assert.True(tally.Solved > 0.5 * Cases, tally.Summary());
-        Assert.True(tally.BarrierShare < 0.02, tally.Summary());
+        // Over the whole domain, far outside any furnace, one case in twenty may need the slower method.
+        Assert.True(tally.BarrierShare < 0.05, tally.Summary());
     }
 
     /// <summary>What is wrong with the outcome of a seed; null where nothing is.</summary>

@@ -11,7 +11,7 @@ public sealed class RemarkRulesTests
         [RemarkCode.ExtrapolatedInTemperature] = (
             CopperWith(new ChargeItem("Pb", 1)) with { TemperatureKelvin = 1773 }, CopperWith(new ChargeItem("Pb", 1)), "Pb"),
         [RemarkCode.ExtrapolatedInComposition] = (LeadSlag(lime: 1), LeadSlag(lime: 15), "Pb"),
-        [RemarkCode.DatumAssumed] = (CopperWith(new ChargeItem("Se", 1)), CopperWith(new ChargeItem("Pb", 1)), "Se"),
+        [RemarkCode.DatumAssumed] = (CopperWith(new ChargeItem("Pd", 1)), CopperWith(new ChargeItem("Pb", 1)), "Pd"),
         [RemarkCode.DatumMissing] = (Vessels.Lead.Plus(new ChargeItem("W", 1)), Vessels.Lead, "W"),
         [RemarkCode.FromMemory] = (Vessels.Lead.Plus(new ChargeItem("As", 0.01)), Vessels.Lead, ""),
         [RemarkCode.ActivityAboveOne] = (Vessels.Lead.Plus(new ChargeItem("Fe", 1)), Vessels.Lead.Plus(new ChargeItem("Fe", 1e-5)), "Fe"),
