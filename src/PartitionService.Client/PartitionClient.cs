@@ -152,6 +152,19 @@ public sealed class PartitionClient : IDisposable
         return CallAsync(options => catalogue.ExplainDatumAsync(request, options), cancellation);
     }
 
+    /// <summary>Tells what the catalogue knows and how well: solutes in metals, oxides in slags, vapour species.</summary>
+    /// <param name="kind">The table; unspecified: all tables.</param>
+    /// <param name="cancellation">Gives the call up.</param>
+    /// <returns>The tables with their counts by trust level.</returns>
+    /// <exception cref="InvalidCaseException">There is no such table.</exception>
+    /// <exception cref="PartitionException">Any other failure.</exception>
+    public Task<GetCoverageResponse> GetCoverageAsync(
+        CoverageKind kind = CoverageKind.Unspecified, CancellationToken cancellation = default)
+    {
+        var request = new GetCoverageRequest { Kind = kind };
+        return CallAsync(options => catalogue.GetCoverageAsync(request, options), cancellation);
+    }
+
     /// <summary>Converts an activity of a dilute solute between reference states.</summary>
     /// <param name="request">Solvent, solute, temperature in [500, 2500] K, activity in (0, 1e30] and both reference states.</param>
     /// <param name="cancellation">Gives the call up.</param>

@@ -163,6 +163,7 @@ public sealed class PartitionClientTests
                     ListSolutesRequest => new ListSolutesResponse { Solutes = { new Solute { Element = "Pb" } } },
                     ListSlagFamiliesRequest => new ListSlagFamiliesResponse { SlagFamilies = { new SlagFamily { Name = "lead-oxide" } } },
                     ListDataRequest => new ListDataResponse { Data = { new CatalogueDatum { Key = "metal/Cu/Pb#1" } } },
+                    GetCoverageRequest => new GetCoverageResponse { CatalogueDigest = "digest" },
                     ExplainDatumRequest => new ExplainDatumResponse { Slot = "metal/Cu/Pb" },
                     _ => new ConvertActivityCoefficientResponse { Activity = 0.25 },
                 };
@@ -176,6 +177,7 @@ public sealed class PartitionClientTests
         Assert.Equal("lead-oxide", (await client.ListSlagFamiliesAsync().SingleAsync()).Name);
         Assert.Equal("metal/Cu/Pb#1", (await client.ListDataAsync(filter).SingleAsync()).Key);
         Assert.Equal("metal/Cu/Pb", (await client.ExplainDatumAsync("metal/Cu/Pb", 1400)).Slot);
+        Assert.Equal("digest", (await client.GetCoverageAsync(CoverageKind.Slags)).CatalogueDigest);
         Assert.Equal(0.25, (await client.ConvertActivityCoefficientAsync(new ConvertActivityCoefficientRequest { Solvent = "Cu" })).Activity);
 
         IMessage[] expected =
@@ -184,6 +186,7 @@ public sealed class PartitionClientTests
             new ListSlagFamiliesRequest(),
             new ListDataRequest { Kind = DatumKind.Oxidation, SlotPrefix = "oxidation/", Element = "Pb" },
             new ExplainDatumRequest { Slot = "metal/Cu/Pb", TemperatureKelvin = 1400 },
+            new GetCoverageRequest { Kind = CoverageKind.Slags },
             new ConvertActivityCoefficientRequest { Solvent = "Cu" },
         ];
         Assert.Equal(expected, requests);

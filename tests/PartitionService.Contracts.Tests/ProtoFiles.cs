@@ -15,6 +15,7 @@ internal static class ProtoFiles
         CatalogueReflection.Descriptor,
         CatalogueServiceReflection.Descriptor,
         ChargeReflection.Descriptor,
+        DerivativeReflection.Descriptor,
         EquilibriumServiceReflection.Descriptor,
         ErrorReflection.Descriptor,
     ];

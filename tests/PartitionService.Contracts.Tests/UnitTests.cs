@@ -13,7 +13,7 @@ public sealed class UnitTests
     /// <summary>Numbers without a unit, or (value, sigma) with the unit in a field of its own.</summary>
     private static readonly string[] Dimensionless =
     [
-        "activity", "activity_coefficient", "efficiency", "epsilon", "largest_balance_error", "ln_gamma", "ln_gamma0", "metal_activity",
+        "activity", "activity_coefficient", "derivatives", "efficiency", "epsilon", "largest_balance_error", "ln_gamma", "ln_gamma0", "metal_activity",
         "oxide_activity", "partition_ratio_slag_to_metal", "sigma", "sigma_ln_gamma", "value",
     ];
 

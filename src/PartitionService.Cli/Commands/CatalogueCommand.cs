@@ -14,7 +14,7 @@ internal static class CatalogueCommand
     public static Command Create(Terminal terminal) =>
         new("catalogue", "Shows what the service knows, from where and how well.")
         {
-            Solvents(terminal), Solutes(terminal), Slags(terminal), Data(terminal), Explain(terminal),
+            Solvents(terminal), Solutes(terminal), Slags(terminal), Data(terminal), Explain(terminal), Coverage(terminal),
         };
 
     private static Command Solvents(Terminal terminal)
@@ -90,8 +90,33 @@ internal static class CatalogueCommand
         return command;
     }
 
+    private static Command Coverage(Terminal terminal)
+    {
+        var tables = Enum.GetValues<CoverageKind>().Where(kind => kind != CoverageKind.Unspecified).ToDictionary(Words.Hyphenated);
+        var table = new Option<string?>("--table") { Description = "Only this table. Unset: all tables." };
+        table.AcceptOnlyFromAmong([.. tables.Keys]);
+        var command = new Command("coverage", "Shows what the catalogue knows and how well, with the gaps.") { table };
+        Written(command, terminal, async (parsed, client, stop) =>
+        {
+            var kind = parsed.GetValue(table) is { } word ? tables[word] : CoverageKind.Unspecified;
+            var coverage = await client.GetCoverageAsync(kind, stop).ConfigureAwait(false);
+            return (format, file) => CoverageText.Render(coverage, format, terminal, file);
+        });
+        return command;
+    }
+
     private static void Listed(
-        Command command, Terminal terminal, Func<ParseResult, PartitionClient, CancellationToken, Task<Listing>> list)
+        Command command, Terminal terminal, Func<ParseResult, PartitionClient, CancellationToken, Task<Listing>> list) =>
+        Written(command, terminal, async (parsed, client, stop) =>
+        {
+            var listing = await list(parsed, client, stop).ConfigureAwait(false);
+            return (format, file) => ListingText.Render(listing, format, terminal, file);
+        });
+
+    private static void Written(
+        Command command,
+        Terminal terminal,
+        Func<ParseResult, PartitionClient, CancellationToken, Task<Func<string, string?, string>>> ask)
     {
         var service = new ServiceOptions();
         service.AddTo(command);
@@ -99,8 +124,8 @@ internal static class CatalogueCommand
         {
             var connection = await service.OpenAsync(parsed, cancellation).ConfigureAwait(false);
             await using var _ = connection.ConfigureAwait(false);
-            var listing = await list(parsed, connection.Client, cancellation).ConfigureAwait(false);
-            var text = ListingText.Render(listing, service.FormatOf(parsed), terminal, service.FileOf(parsed));
+            var render = await ask(parsed, connection.Client, cancellation).ConfigureAwait(false);
+            var text = render(service.FormatOf(parsed), service.FileOf(parsed));
             await OutputFile.WriteAsync(text, service.FileOf(parsed), terminal, cancellation).ConfigureAwait(false);
             return ExitCode.Success;
         });

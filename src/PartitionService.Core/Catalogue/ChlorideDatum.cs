@@ -27,4 +27,7 @@ public sealed record ChlorideDatum : Datum
 
     /// <summary>Delta G in J per mol of metal atoms at a temperature in kelvin, extrapolating outside the range.</summary>
     public double GibbsEnergy(double temperatureKelvin) => EnthalpyJoulePerMol + (SlopeJoulePerMolKelvin * temperatureKelvin);
+
+    /// <summary>Derivative of Delta G with respect to temperature in J/(mol K), the same at every temperature.</summary>
+    public double GibbsEnergyPerKelvin => SlopeJoulePerMolKelvin;
 }

@@ -30,4 +30,8 @@ public sealed record GasSpeciesDatum : Datum
         ConstantJoulePerMol
         + (LinearJoulePerMolKelvin * temperatureKelvin)
         + (LogarithmicJoulePerMolKelvin * temperatureKelvin * Math.Log(temperatureKelvin));
+
+    /// <summary>Derivative of Delta G with respect to temperature, B + C (ln T + 1), in J/(mol K).</summary>
+    public double GibbsEnergyPerKelvin(double temperatureKelvin) =>
+        LinearJoulePerMolKelvin + (LogarithmicJoulePerMolKelvin * (Math.Log(temperatureKelvin) + 1));
 }

@@ -30,4 +30,7 @@ public sealed record InfiniteDilutionDatum : Datum
 
     /// <summary>ln gamma0 at a temperature in kelvin, extrapolating outside the range.</summary>
     public double LnGamma(double temperatureKelvin) => Constant + (InverseTemperatureKelvin / temperatureKelvin);
+
+    /// <summary>Derivative of <see cref="LnGamma"/> with respect to temperature, -b/T^2, per kelvin.</summary>
+    public double LnGammaPerKelvin(double temperatureKelvin) => -InverseTemperatureKelvin / (temperatureKelvin * temperatureKelvin);
 }

@@ -28,4 +28,7 @@ public sealed record InteractionDatum : Datum
 
     /// <summary>epsilon at a temperature in kelvin, extrapolating outside the range.</summary>
     public double Epsilon(double temperatureKelvin) => Constant + (InverseTemperatureKelvin / temperatureKelvin);
+
+    /// <summary>Derivative of epsilon with respect to temperature, -b/T^2, per kelvin.</summary>
+    public double EpsilonPerKelvin(double temperatureKelvin) => -InverseTemperatureKelvin / (temperatureKelvin * temperatureKelvin);
 }

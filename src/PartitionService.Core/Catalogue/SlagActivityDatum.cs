@@ -55,4 +55,7 @@ public sealed record SlagActivityDatum : Datum
 
     /// <summary>ln gamma (or ln(K/gamma)) at a temperature in kelvin without the slope term.</summary>
     public double LnGamma(double temperatureKelvin) => Constant + (InverseTemperatureKelvin / temperatureKelvin);
+
+    /// <summary>Derivative of <see cref="LnGamma"/> with respect to temperature, -b/T^2, per kelvin.</summary>
+    public double LnGammaPerKelvin(double temperatureKelvin) => -InverseTemperatureKelvin / (temperatureKelvin * temperatureKelvin);
 }

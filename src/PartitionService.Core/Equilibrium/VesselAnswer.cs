@@ -65,6 +65,9 @@ public sealed record VesselAnswer
 
     /// <summary>How the solution was found.</summary>
     public required SolutionReport Solution { get; init; }
+
+    /// <summary>Derivatives; null unless they were asked for.</summary>
+    public DerivativeReport? Derivatives { get; init; }
 }
 
 /// <summary>Balance of one element; the six fractions are shares of the input and add up to 1.</summary>

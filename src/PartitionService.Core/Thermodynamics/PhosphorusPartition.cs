@@ -28,4 +28,24 @@ public static class PhosphorusPartition
         return (0.072 * basicity) + (11570 / temperatureKelvin) - 10.52
             + (2.5 * Math.Log10(Math.Max(ironMassPercent, LowestIronMassPercent)));
     }
+
+    /// <summary>Derivative of <see cref="Log10"/> with respect to temperature, per kelvin.</summary>
+    public static double Log10PerKelvin(double temperatureKelvin) => -11570 / (temperatureKelvin * temperatureKelvin);
+
+    /// <summary>Derivative of <see cref="Log10"/> with respect to total iron, per mass %; zero below the lowest iron.</summary>
+    public static double Log10PerIronMassPercent(double ironMassPercent) =>
+        ironMassPercent > LowestIronMassPercent ? 2.5 / (ironMassPercent * Math.Log(10)) : 0;
+
+    /// <summary>Derivative of <see cref="Log10"/> with respect to an oxide, per mass %, the iron term left out.</summary>
+    public static double Log10PerMassPercent(string oxide) => oxide switch
+    {
+        "CaO" => 0.072,
+        "MgO" => 0.072 * 0.3,
+        "P2O5" => 0.072 * 0.6,
+        "MnO" => 0.072 * 0.2,
+        "Al2O3" => 0.072 * -0.5,
+        "Na2O" => 0.072 * 1.2,
+        "BaO" => 0.072 * 0.9,
+        _ => 0,
+    };
 }

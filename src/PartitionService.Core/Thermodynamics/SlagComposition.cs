@@ -70,12 +70,17 @@ public sealed record SlagComposition(IReadOnlyDictionary<string, double> MassPer
         {
             if (OxideFormulas.Get(oxide) is { } formula)
             {
-                sum += massPercent / formula.MolarMass(elements) * formula.Atoms.Where(atom => atom.Key != "O").Sum(atom => atom.Value);
+                sum += massPercent / formula.MolarMass(elements)
+                    * formula.Atoms.Where(atom => atom.Key is not ("O" or "F" or "Cl" or "Br" or "I")).Sum(atom => atom.Value);
             }
         }
 
         return sum;
     }
+
+    /// <summary>Weight of an oxide in the basicity sum for phosphorus (Turkdogan and Pearson 1953); zero for those that are not in it.</summary>
+    internal static double BasicityWeight(string oxide) =>
+        oxide switch { "CaO" => 22, "MgO" => 15, "MnO" => 13, "FeO" => 12, "SiO2" => -2, _ => 0 };
 
     private double? BasicitySum(IReadOnlyDictionary<string, Element> elements)
     {
@@ -89,7 +94,7 @@ public sealed record SlagComposition(IReadOnlyDictionary<string, double> MassPer
 
             var amount = massPercent / formula.MolarMass(elements);
             moles += amount;
-            sum += amount * oxide switch { "CaO" => 22, "MgO" => 15, "MnO" => 13, "FeO" => 12, "SiO2" => -2, _ => 0 };
+            sum += amount * BasicityWeight(oxide);
         }
 
         return moles > 0 ? sum / moles : null;

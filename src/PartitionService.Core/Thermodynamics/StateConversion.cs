@@ -53,6 +53,44 @@ public static class StateConversion
         }
     }
 
+    /// <summary>Derivative of <see cref="LnReferenceOverState"/> with respect to temperature, per kelvin; zero where there is no conversion.</summary>
+    /// <param name="element">The element.</param>
+    /// <param name="state">Standard state of the row.</param>
+    /// <param name="temperatureKelvin">Temperature in kelvin.</param>
+    /// <param name="catalogue">Fusion data and gas species.</param>
+    public static double LnReferenceOverStatePerKelvin(
+        Element element, StandardState state, double temperatureKelvin, ThermochemicalCatalogue catalogue)
+    {
+        switch (state)
+        {
+            case StandardState.Solid:
+                return element.EnthalpyOfFusionJoulePerMol
+                    / (PhysicalConstants.GasConstant * temperatureKelvin * temperatureKelvin);
+            case StandardState.MonatomicGas:
+                return GasSlope(element.Symbol);
+            case StandardState.HalfDiatomicGas when !HasDiatomicReference(element.Symbol):
+                return GasSlope($"{element.Symbol}2") / 2;
+            default:
+                return 0;
+        }
+
+        double GasSlope(string species) =>
+            Gas(catalogue, species) is { } row
+                ? GibbsEnergyOverThermalPerKelvin(
+                    row.GibbsEnergy(temperatureKelvin), row.GibbsEnergyPerKelvin(temperatureKelvin), temperatureKelvin)
+                : 0;
+    }
+
+    /// <summary>Derivative of Delta G/RT with respect to temperature, per kelvin.</summary>
+    /// <param name="gibbsEnergy">Delta G in J/mol.</param>
+    /// <param name="perKelvin">Its derivative in J/(mol K); zero for a number that does not vary.</param>
+    /// <param name="temperatureKelvin">Temperature in kelvin.</param>
+    public static double GibbsEnergyOverThermalPerKelvin(double gibbsEnergy, double perKelvin, double temperatureKelvin) =>
+        (perKelvin - (gibbsEnergy / temperatureKelvin)) / (PhysicalConstants.GasConstant * temperatureKelvin);
+
     private static double? GasEnergy(ThermochemicalCatalogue catalogue, string species, double temperatureKelvin) =>
-        catalogue.Slot<GasSpeciesDatum>($"gas/{species}").FirstOrDefault(row => row.Preferred)?.GibbsEnergy(temperatureKelvin);
+        Gas(catalogue, species)?.GibbsEnergy(temperatureKelvin);
+
+    private static GasSpeciesDatum? Gas(ThermochemicalCatalogue catalogue, string species) =>
+        catalogue.Slot<GasSpeciesDatum>($"gas/{species}").FirstOrDefault(row => row.Preferred);
 }

@@ -15,4 +15,11 @@ public static class SulfideCapacity
     /// </remarks>
     public static double Log10(double opticalBasicity, double temperatureKelvin) =>
         ((22690 - (54640 * opticalBasicity)) / temperatureKelvin) + (43.6 * opticalBasicity) - 25.2;
+
+    /// <summary>Derivative of <see cref="Log10"/> with respect to temperature, per kelvin.</summary>
+    public static double Log10PerKelvin(double opticalBasicity, double temperatureKelvin) =>
+        -(22690 - (54640 * opticalBasicity)) / (temperatureKelvin * temperatureKelvin);
+
+    /// <summary>Derivative of <see cref="Log10"/> with respect to the optical basicity.</summary>
+    public static double Log10PerOpticalBasicity(double temperatureKelvin) => 43.6 - (54640 / temperatureKelvin);
 }

@@ -27,6 +27,7 @@ internal static class AnswerMapping
             Allowances = answer.Allowances is null ? null : ToWire(answer.Allowances),
             WeakestAccess = EnumMapping.ToWire(answer.WeakestAccess),
             Solution = ToWire(answer.Solution),
+            Derivatives = answer.Derivatives is null ? null : DerivativeMapping.ToWire(answer.Derivatives),
         };
         sent.Elements.AddRange(answer.Elements.Select(ToWire));
         sent.Remarks.AddRange(answer.Remarks.Select(ProvenanceMapping.ToWire));

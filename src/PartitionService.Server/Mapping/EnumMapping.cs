@@ -22,6 +22,12 @@ internal static class EnumMapping
     /// <summary>Weight of a remark; the numbers are the same on both sides.</summary>
     public static Wire.Severity ToWire(Severity severity) => (Wire.Severity)(int)severity;
 
+    /// <summary>Kind of a differentiated quantity; the numbers are the same on both sides.</summary>
+    public static Wire.DerivativeOutputKind ToWire(DerivativeOutputKind kind) => (Wire.DerivativeOutputKind)(int)kind;
+
+    /// <summary>Kind of a parameter; the numbers are the same on both sides.</summary>
+    public static Wire.DerivativeParameterKind ToWire(DerivativeParameterKind kind) => (Wire.DerivativeParameterKind)(int)kind;
+
     /// <summary>Code of a remark; the numbers are the same on both sides.</summary>
     public static Wire.RemarkCode ToWire(RemarkCode code) => (Wire.RemarkCode)(int)code;
 }

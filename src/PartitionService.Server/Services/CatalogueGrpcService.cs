@@ -125,6 +125,19 @@ internal sealed class CatalogueGrpcService(ThermochemicalCatalogue catalogue) : 
         return Task.FromResult(response);
     }
 
+    /// <inheritdoc/>
+    public override Task<GetCoverageResponse> GetCoverage(GetCoverageRequest request, ServerCallContext context)
+    {
+        Check(0, null, violations =>
+        {
+            if (!Enum.IsDefined(request.Kind))
+                violations.Add(new CaseViolation("kind", Text((int)request.Kind), "must be a value of CoverageKind"));
+        });
+        var response = new GetCoverageResponse { CatalogueDigest = catalogue.Digest };
+        response.Tables.AddRange(CoverageMapping.ToWire(CoverageMatrix.Of(catalogue), request.Kind));
+        return Task.FromResult(response);
+    }
+
     private static bool Matches(Datum datum, ListDataRequest request)
     {
         if (!request.IncludeCompeting && !datum.Preferred)

@@ -25,8 +25,9 @@ internal sealed class EquilibriumGrpcService(VesselSolve solve, ThermochemicalCa
         if (shape.Count > 0)
             throw Refuse(shape, CaseValidation.Validate(vesselCase, catalogue));
 
+        var options = DerivativeMapping.ToOptions(request.Derivatives);
         var record = CallRecord.Of(context);
-        switch (await gate.RunAsync(token => solve(vesselCase, token), record.Cancellation))
+        switch (await gate.RunAsync(token => solve(vesselCase, options, token), record.Cancellation))
         {
             case SolveOutcome.Solved solved:
                 record.ElementCount = solved.Answer.Elements.Count;

@@ -55,6 +55,40 @@ public sealed class CatalogueCommandTests
     }
 
     [Fact]
+    public async Task Shows_the_coverage_on_120_columns_with_a_legend()
+    {
+        var (code, output, _) = await ToolTests.RunAsync("catalogue", "coverage");
+
+        Assert.Equal(ExitCode.Success, code);
+        var lines = output.Split('\n').Select(line => line.TrimEnd('\r')).ToList();
+        Assert.StartsWith("Legend   R read in a source; ", lines[0], StringComparison.Ordinal);
+        Assert.All(lines, line => Assert.InRange(line.Length, 0, 120));
+        Assert.All((string[])["Metals ", "Slags ", "Vapours "], title => Assert.Contains(lines, line => line.StartsWith(title, StringComparison.Ordinal)));
+        Assert.Contains("IS iron-silicate", output, StringComparison.Ordinal);
+        Assert.Matches(@"(?m)^PbO +[RADMX.-]", output);
+    }
+
+    [Fact]
+    public async Task Shows_one_table_of_the_coverage()
+    {
+        var (_, output, _) = await ToolTests.RunAsync("catalogue", "coverage", "--table", "slags", "--format", "csv");
+
+        Assert.StartsWith("table,row,element,species,trust,sigma,unit,key\r\nslags,", output, StringComparison.Ordinal);
+        Assert.Matches(@"slags,iron-silicate,Pb,PbO,[a-z]+,[0-9.]+,1,slag/iron-silicate/PbO#[0-9]+\r\n", output);
+        Assert.DoesNotContain("metals,", output, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task Gives_the_coverage_as_a_message()
+    {
+        var (_, output, _) = await ToolTests.RunAsync("catalogue", "coverage", "--table", "vapours", "--format", "json");
+
+        var table = Assert.Single(JsonParser.Default.Parse<GetCoverageResponse>(output).Tables);
+        Assert.Equal(CoverageKind.Vapours, table.Kind);
+        Assert.Contains(table.Cells, cell => cell.Species == "As4O6");
+    }
+
+    [Fact]
     public async Task Tells_that_there_is_no_such_datum()
     {
         var (code, output, error) = await ToolTests.RunAsync("catalogue", "explain", "metal/Xx/Yy");

@@ -72,6 +72,8 @@ internal sealed class LoopbackService : IAsyncDisposable
 
         public override Task<ListDataResponse> ListData(ListDataRequest request, ServerCallContext context) => script.Answer<ListDataResponse>(request);
 
+        public override Task<GetCoverageResponse> GetCoverage(GetCoverageRequest request, ServerCallContext context) => script.Answer<GetCoverageResponse>(request);
+
         public override Task<ExplainDatumResponse> ExplainDatum(ExplainDatumRequest request, ServerCallContext context) => script.Answer<ExplainDatumResponse>(request);
     }
 

@@ -11,7 +11,7 @@ public sealed class ErrorInterceptorTests
     [Fact]
     public async Task Unexpected_exception_reveals_only_the_request_id()
     {
-        await using var server = await RunningServer.StartAsync((c, _) => throw new InvalidOperationException($"secret {c.Name}"));
+        await using var server = await RunningServer.StartAsync((c, _, _) => throw new InvalidOperationException($"secret {c.Name}"));
         var error = await CallError.OfAsync(server.Equilibrium.SolveChargeAsync(WireCases.Request("hidden-melt")));
         Assert.Equal((StatusCode.Internal, "INTERNAL"), (error.Status, error.Reason));
         Assert.Contains(error.Info.Metadata["request_id"], error.Message, StringComparison.Ordinal);
@@ -24,7 +24,7 @@ public sealed class ErrorInterceptorTests
     {
         var stopped = new TaskCompletionSource();
         await using var server = await RunningServer.StartAsync(
-            (_, cancellation) => WaitFor(stopped, cancellation), options => options.DefaultDeadlineSeconds = 0.05);
+            (_, _, cancellation) => WaitFor(stopped, cancellation), options => options.DefaultDeadlineSeconds = 0.05);
         var error = await CallError.OfAsync(server.Equilibrium.SolveChargeAsync(WireCases.Request()));
         Assert.Equal((StatusCode.DeadlineExceeded, "DEADLINE_EXCEEDED"), (error.Status, error.Reason));
         await stopped.Task.WaitAsync(Long);
@@ -35,7 +35,7 @@ public sealed class ErrorInterceptorTests
     {
         var stopped = new TaskCompletionSource();
         await using var server = await RunningServer.StartAsync(
-            (_, cancellation) => WaitFor(stopped, cancellation), options => options.DefaultDeadlineSeconds = 0.001);
+            (_, _, cancellation) => WaitFor(stopped, cancellation), options => options.DefaultDeadlineSeconds = 0.001);
         var start = DateTime.UtcNow;
         var call = server.Equilibrium.SolveChargeAsync(WireCases.Request(), Id("late"), start.AddSeconds(0.4));
         var exception = await Assert.ThrowsAsync<RpcException>(async () => await call);
@@ -51,7 +51,7 @@ public sealed class ErrorInterceptorTests
     {
         var started = new TaskCompletionSource();
         var stopped = new TaskCompletionSource();
-        await using var server = await RunningServer.StartAsync((_, cancellation) =>
+        await using var server = await RunningServer.StartAsync((_, _, cancellation) =>
         {
             started.SetResult();
             return WaitFor(stopped, cancellation);
@@ -73,7 +73,7 @@ public sealed class ErrorInterceptorTests
         using var release = new ManualResetEventSlim();
         var started = new TaskCompletionSource();
         await using var server = await RunningServer.StartAsync(
-            (c, _) =>
+            (c, _, _) =>
             {
                 started.TrySetResult();
                 release.Wait(Long, CancellationToken.None);

@@ -39,7 +39,7 @@ public sealed class CallLogTests
     [Fact]
     public async Task Solved_call_is_one_event_with_its_figures()
     {
-        await using var server = await RunningServer.StartAsync((c, _) => new SolveOutcome.Solved(CoreAnswers.Full(c.Name)));
+        await using var server = await RunningServer.StartAsync((c, _, _) => new SolveOutcome.Solved(CoreAnswers.Full(c.Name)));
         await server.Equilibrium.SolveChargeAsync(WireCases.Request(), Headers("one"));
         var logged = await server.CallEventAsync("one");
         Assert.Equal(LogEventLevel.Information, logged.Level);
@@ -53,7 +53,7 @@ public sealed class CallLogTests
     [Fact]
     public async Task Fault_is_an_error_with_its_trace()
     {
-        await using var server = await RunningServer.StartAsync((_, _) => throw new InvalidOperationException(Secret));
+        await using var server = await RunningServer.StartAsync((_, _, _) => throw new InvalidOperationException(Secret));
         await CallError.OfAsync(server.Equilibrium.SolveChargeAsync(WireCases.Request(), Headers("two")));
         var logged = await server.CallEventAsync("two");
         Assert.Equal((LogEventLevel.Error, "INTERNAL"), (logged.Level, LogText.Of(logged, "Reason")));
@@ -65,7 +65,7 @@ public sealed class CallLogTests
     [Fact]
     public async Task Nothing_of_a_payload_reaches_the_log()
     {
-        VesselSolve solve = (c, _) => c.Charge.Count switch
+        VesselSolve solve = (c, _, _) => c.Charge.Count switch
         {
             6 => new SolveOutcome.Solved(CoreAnswers.Full(c.Name)),
             1 => throw new InvalidOperationException(c.Name, new ArgumentException(c.Name)),

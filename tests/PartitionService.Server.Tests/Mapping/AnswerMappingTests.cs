@@ -44,6 +44,7 @@ public sealed class AnswerMappingTests
             Slag = null,
             Gas = null,
             Allowances = null,
+            Derivatives = null,
             WeakestAccess = null,
             Redox = new Core.Equilibrium.RedoxReport { OxygenToSupplyKg = 0, OxygenToSupplyNormalCubicMetre = 0 },
             Elements = [full.Elements[0] with { MetalMassPpm = null, SlagMassPpm = null, PartitionRatioSlagToMetal = null, Activity = null }],
@@ -55,6 +56,7 @@ public sealed class AnswerMappingTests
         Assert.Null(sent.Slag);
         Assert.Null(sent.Gas);
         Assert.Null(sent.Allowances);
+        Assert.Null(sent.Derivatives);
         Assert.Equal(Contracts.V1.Access.Unspecified, sent.WeakestAccess);
         Assert.Equal(Contracts.V1.Access.Unspecified, sent.DataUsed[0].Access);
         Assert.False(sent.DataUsed[0].HasSigma);

@@ -16,7 +16,17 @@ public sealed class EnumMappingTests
     public void Severities_map_by_name() => Pairs<Severity, Wire.Severity>(EnumMapping.ToWire);
 
     [Fact]
+    public void Derivative_outputs_map_by_name() => Pairs<DerivativeOutputKind, Wire.DerivativeOutputKind>(EnumMapping.ToWire);
+
+    [Fact]
+    public void Derivative_parameters_map_by_name() =>
+        Pairs<DerivativeParameterKind, Wire.DerivativeParameterKind>(EnumMapping.ToWire);
+
+    [Fact]
     public void Accesses_map_by_name() => Pairs<Access, Wire.Access>(access => EnumMapping.ToWire(access));
+
+    [Fact]
+    public void Coverage_trusts_map_by_name() => Pairs<CoverageTrust, Wire.CoverageTrust>(CoverageMapping.ToWire);
 
     [Fact]
     public void No_access_is_unspecified() => Assert.Equal(Wire.Access.Unspecified, EnumMapping.ToWire((Access?)null));
@@ -59,6 +69,7 @@ public sealed class EnumMappingTests
     public void Unknown_members_are_refused()
     {
         Assert.Throws<ArgumentOutOfRangeException>(() => EnumMapping.ToWire((Access)99));
+        Assert.Throws<ArgumentOutOfRangeException>(() => CoverageMapping.ToWire((CoverageTrust)99));
         Assert.Throws<ArgumentOutOfRangeException>(() => FailureMapping.ToReason((SolveFailure)99));
     }
 

@@ -146,6 +146,42 @@ public sealed class CatalogueGrpcServiceTests(SharedServer shared) : IClassFixtu
     }
 
     [Fact]
+    public async Task Coverage_comes_with_all_tables_and_their_counts()
+    {
+        var answer = await Client.GetCoverageAsync(new GetCoverageRequest());
+        Assert.Equal(Core.Digest, answer.CatalogueDigest);
+        Assert.Equal([CoverageKind.Metals, CoverageKind.Slags, CoverageKind.Vapours], answer.Tables.Select(t => t.Kind));
+        Assert.All(answer.Tables, t =>
+        {
+            Assert.Equal(Enum.GetValues<Contracts.V1.CoverageTrust>().Skip(1), t.Counts.Select(c => c.Trust));
+            Assert.All(t.Counts, c => Assert.Equal(t.Cells.Count(cell => cell.Trust == c.Trust), c.CellCount));
+            Assert.All(t.Cells, c => Assert.Equal(c.Trust == Contracts.V1.CoverageTrust.Missing, !c.HasSigma));
+        });
+    }
+
+    [Theory]
+    [InlineData(CoverageKind.Metals, "Cu", "Pb", "metal/Cu/Pb#1", "1")]
+    [InlineData(CoverageKind.Slags, "iron-silicate", "Pb", "slag/iron-silicate/PbO#", "1")]
+    [InlineData(CoverageKind.Vapours, "gas", "Pb", "gas/Pb", "J/mol")]
+    public async Task One_table_of_the_coverage_can_be_asked_for(CoverageKind kind, string row, string element, string keyStart, string unit)
+    {
+        var table = Assert.Single((await Client.GetCoverageAsync(new GetCoverageRequest { Kind = kind })).Tables);
+        Assert.Equal(kind, table.Kind);
+        Assert.Contains(row, table.Rows);
+        var cells = table.Cells.Where(c => c.Row == row && c.Element == element).ToList();
+        Assert.NotEmpty(cells);
+        Assert.All(cells, c => Assert.StartsWith(keyStart, c.Key, StringComparison.Ordinal));
+        Assert.All(cells, c => Assert.Equal(unit, c.Unit));
+    }
+
+    [Fact]
+    public async Task Unknown_table_of_the_coverage_is_refused()
+    {
+        var failure = await Assert.ThrowsAsync<RpcException>(async () => await Client.GetCoverageAsync(new GetCoverageRequest { Kind = (CoverageKind)99 }));
+        Assert.Equal(StatusCode.InvalidArgument, failure.StatusCode);
+    }
+
+    [Fact]
     public async Task Unknown_datum_is_not_found()
     {
         var error = await CallError.OfAsync(Client.ExplainDatumAsync(new ExplainDatumRequest { Slot = "metal/Cu/Qq" }));

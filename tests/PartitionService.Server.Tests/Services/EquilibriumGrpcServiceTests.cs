@@ -10,7 +10,7 @@ public sealed class EquilibriumGrpcServiceTests
     [Fact]
     public async Task Answer_and_label_come_back()
     {
-        await using var server = await RunningServer.StartAsync((c, _) => new SolveOutcome.Solved(CoreAnswers.Full(c.Name)));
+        await using var server = await RunningServer.StartAsync((c, _, _) => new SolveOutcome.Solved(CoreAnswers.Full(c.Name)));
         var response = await server.Equilibrium.SolveChargeAsync(WireCases.Request("ladle 7"));
         Assert.Equal("ladle 7", response.Answer.Name);
         Assert.Equal("Cu", response.Answer.Solvent);
@@ -109,7 +109,7 @@ public sealed class EquilibriumGrpcServiceTests
     [InlineData(SolveFailure.NotConverged, StatusCode.Internal, "NOT_CONVERGED")]
     public async Task Failure_has_its_status_and_reason(SolveFailure failure, StatusCode status, string reason)
     {
-        await using var server = await RunningServer.StartAsync((_, _) => new SolveOutcome.Failed(failure, "Charge less oxygen.", ["O", "Zn"]));
+        await using var server = await RunningServer.StartAsync((_, _, _) => new SolveOutcome.Failed(failure, "Charge less oxygen.", ["O", "Zn"]));
         var error = await CallError.OfAsync(server.Equilibrium.SolveChargeAsync(WireCases.Request()));
         Assert.Equal((status, reason), (error.Status, error.Reason));
         Assert.Equal("Charge less oxygen.", error.Message);
@@ -119,7 +119,7 @@ public sealed class EquilibriumGrpcServiceTests
     [Fact]
     public async Task Sixty_four_calls_at_a_time_get_their_own_answers()
     {
-        await using var server = await RunningServer.StartAsync((c, _) =>
+        await using var server = await RunningServer.StartAsync((c, _, _) =>
         {
             Thread.Sleep(5);
             return new SolveOutcome.Solved(CoreAnswers.Full(c.Name));

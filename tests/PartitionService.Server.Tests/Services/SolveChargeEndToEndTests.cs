@@ -36,6 +36,28 @@ public sealed class SolveChargeEndToEndTests(SharedServer shared) : IClassFixtur
             Assert.True(Metal(oxidising, element) < Metal(reducing, element), element);
     }
 
+    /// <summary>The tangent predicts a small step of the temperature; without a request there is none.</summary>
+    [Fact]
+    public async Task Derivatives_come_on_request_and_predict_a_small_step()
+    {
+        var request = WireCases.Request();
+        Assert.Null((await Client.SolveChargeAsync(request)).Answer.Derivatives);
+        request.Derivatives = new DerivativeRequest { Temperature = true, Data = true };
+        var before = (await Client.SolveChargeAsync(request)).Answer;
+        request.VesselCase.TemperatureKelvin += 0.5;
+        var after = (await Client.SolveChargeAsync(request)).Answer;
+        var row = before.Derivatives.Outputs.ToList().FindIndex(o => o is { Kind: DerivativeOutputKind.SlagFraction, Element: "Sn" });
+        var column = before.Derivatives.Columns[0];
+        Assert.Equal(DerivativeParameterKind.Temperature, column.Kind);
+        var change = Slag(after) - Slag(before);
+        Assert.Equal(change, 0.5 * column.Derivatives[row], 0.01 * Math.Abs(change));
+        Assert.Equal(
+            before.DataUsed.Select(use => use.Key.Split('#')[0]).Distinct(),
+            before.Derivatives.Columns.Skip(1).Select(c => c.Name));
+
+        static double Slag(ChargeAnswer answer) => answer.Elements.Single(e => e.Element == "Sn").SlagFraction;
+    }
+
     [Fact]
     public async Task Charge_without_a_metal_has_no_solvent()
     {

@@ -60,5 +60,8 @@ public static class CoreAnswers
         ],
         WeakestAccess = Access.Memory,
         Solution = new SolutionReport(37, 4, 1.2e-13, true),
+        Derivatives = new DerivativeReport(
+            [new(DerivativeOutputKind.MetalFraction, "Cu")],
+            [new(DerivativeParameterKind.ChargeQuantity, "PbO", 3, "kg", 21.5, true, [-0.00125])]),
     };
 }

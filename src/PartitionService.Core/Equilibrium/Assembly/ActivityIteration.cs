@@ -6,10 +6,12 @@ namespace PartitionService.Core.Equilibrium.Assembly;
 /// <summary>Solves an assembled case, with passes over activity coefficients that depend on composition.</summary>
 /// <remarks>
 /// At fixed coefficients the problem has one solution. A pass solves it and moves the coefficients towards those of the new
-/// composition; the move is halved whenever the passes stop coming closer.
+/// composition, by a step that follows from the last two distances.
 /// </remarks>
 internal static class ActivityIteration
 {
+    private const double LargestMove = 3;
+
     /// <summary>Solves the case.</summary>
     /// <param name="assembly">The case; its ln K of metal and slag species are updated.</param>
     /// <param name="dissolvedOxygenMassFraction">Stated oxygen of the metal as a mass fraction; null with any other statement.</param>
@@ -42,9 +44,11 @@ internal static class ActivityIteration
         var iterations = result.Iterations;
         var barrier = result.UsedBarrier;
         var passes = 0;
-        var damping = 1.0;
-        var lastChange = double.PositiveInfinity;
         var settled = assembled.Interactions.IsEmpty && dissolvedOxygenMassFraction is null && slag is null;
+
+        // Distances of all coefficients from those of the new composition: solutes, solvent, oxygen potential, slag constants.
+        var residual = new double[metal.Length + 2 + (slag?.Count ?? 0)];
+        var relaxation = new RelaxationFactor();
         while (result.Stop == SaddleSolver.Stop.Converged && !settled)
         {
             if (++passes > Convergence.ActivityPassLimit)
@@ -59,56 +63,70 @@ internal static class ActivityIteration
             }
 
             assembled.Interactions.Evaluate(fraction, excess, out var solventTarget);
-            var change = Math.Abs(solventTarget - solventLnGamma);
             for (var i = 0; i < metal.Length; i++)
             {
-                change = Math.Max(change, Math.Abs((assembled.Species[metal[i]].LnGamma ?? 0) + excess[i] - lnGamma[i]));
+                residual[i] = (assembled.Species[metal[i]].LnGamma ?? 0) + excess[i] - lnGamma[i];
             }
 
-            double? potential = dissolvedOxygenMassFraction is { } mass
-                ? DissolvedPotential(assembled, mass, elements, work, excess)
-                : null;
-            if (potential is { } target)
+            residual[metal.Length] = solventTarget - solventLnGamma;
+            residual[metal.Length + 1] = dissolvedOxygenMassFraction is { } mass
+                ? DissolvedPotential(assembled, mass, elements, work, excess) - problem.LinkPotential[assembled.OxygenLink]
+                : 0;
+            slag?.Measure(work, residual.AsSpan(metal.Length + 2));
+            settled = Largest(residual) <= Convergence.ActivityTolerance;
+            if (settled)
             {
-                change = Math.Max(change, Math.Abs(target - problem.LinkPotential[assembled.OxygenLink]));
+                break;
             }
 
-            if (slag is not null)
-            {
-                change = Math.Max(change, slag.Move(work, damping));
-            }
-
-            settled = change <= Convergence.ActivityTolerance;
-            damping = change > 0.9 * lastChange ? Math.Max(0.05, 0.7 * damping) : Math.Min(1, 1.1 * damping);
-            lastChange = change;
-            solventLnGamma += damping * (solventTarget - solventLnGamma);
+            relaxation.Update(residual);
+            Bound(residual, relaxation.Value);
             for (var i = 0; i < metal.Length; i++)
             {
-                lnGamma[i] += damping * ((assembled.Species[metal[i]].LnGamma ?? 0) + excess[i] - lnGamma[i]);
+                lnGamma[i] += residual[i];
                 problem.LnK[metal[i]] = -lnGamma[i];
             }
 
+            solventLnGamma += residual[metal.Length];
             if (assembled.SolventSpecies >= 0)
             {
                 problem.LnK[assembled.SolventSpecies] = -solventLnGamma;
             }
 
-            if (potential is { } next)
+            if (dissolvedOxygenMassFraction is not null)
             {
-                problem.LinkPotential[assembled.OxygenLink] += damping * (next - problem.LinkPotential[assembled.OxygenLink]);
+                problem.LinkPotential[assembled.OxygenLink] += residual[metal.Length + 1];
                 work.Link[assembled.OxygenLink] = problem.LinkPotential[assembled.OxygenLink];
             }
 
-            if (!settled)
-            {
-                ReducedSystem.Shift(problem, work);
-                result = SaddleSolver.Continue(problem, work, cancellation);
-                iterations += result.Iterations;
-                barrier |= result.UsedBarrier;
-            }
+            slag?.Move(residual.AsSpan(metal.Length + 2));
+            ReducedSystem.Shift(problem, work);
+            result = SaddleSolver.Continue(problem, work, cancellation);
+            iterations += result.Iterations;
+            barrier |= result.UsedBarrier;
         }
 
         return new EquilibriumState(assembled, work, result, iterations, passes, barrier, solventLnGamma);
+    }
+
+    /// <summary>Turns distances into moves: times the relaxation factor, at most 3 in any logarithm.</summary>
+    private static void Bound(Span<double> residual, double factor)
+    {
+        for (var i = 0; i < residual.Length; i++)
+        {
+            residual[i] = Math.Clamp(factor * residual[i], -LargestMove, LargestMove);
+        }
+    }
+
+    private static double Largest(ReadOnlySpan<double> residual)
+    {
+        var largest = 0.0;
+        foreach (var value in residual)
+        {
+            largest = Math.Max(largest, Math.Abs(value));
+        }
+
+        return largest;
     }
 
     /// <summary>1/2 ln pO2 at which the metal holds the stated mass fraction of oxygen: ln x_O + ln gamma_O.</summary>

@@ -33,6 +33,12 @@ internal sealed class AssembledCase
     /// <summary>Interaction model over <see cref="MetalSolutes"/>.</summary>
     public required InteractionModel Interactions { get; init; }
 
+    /// <summary>
+    /// Interaction parameters as indices into <see cref="MetalSolutes"/>, once per unordered pair; those of value zero, which the model
+    /// leaves out, included.
+    /// </summary>
+    public required IReadOnlyList<(int First, int Second, InteractionTerm Term)> InteractionTerms { get; init; }
+
     /// <summary>Elements that no phase present has a datum for.</summary>
     public required IReadOnlyList<string> Unplaced { get; init; }
 

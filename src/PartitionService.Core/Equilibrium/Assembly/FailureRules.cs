@@ -1,5 +1,4 @@
 using PartitionService.Core.Equilibrium.Solvers;
-using PartitionService.Core.Thermodynamics;
 
 namespace PartitionService.Core.Equilibrium.Assembly;
 
@@ -37,13 +36,49 @@ internal static class FailureRules
             : null;
     }
 
-    /// <summary>Failures of the iteration; null where it converged to a sensible state.</summary>
-    public static SolveOutcome.Failed? After(VesselAssembly assembly, EquilibriumState state)
+    /// <summary>Mole fraction of dissolved oxygen beyond which a metal is none any more; oxygen saturates every metal far below.</summary>
+    private const double MostDissolvedOxygen = 0.3;
+
+    /// <summary>
+    /// True where a closed oxygen balance gave a "metal" that is largely oxygen, or did not converge on the way there: Henry's law for
+    /// dissolved oxygen has no limit of its own, so a metal that all should be oxidised can swallow the excess instead.
+    /// </summary>
+    public static bool IsOverblown(VesselAssembly assembly, EquilibriumState state)
     {
+        if (assembly.FixedOxygen is not null || assembly.Assembled.OxygenLink < 0)
+        {
+            return false;
+        }
+
+        var dissolved = Array.FindIndex(assembly.Assembled.Species, s => s is { Phase: PhaseKind.Metal, Name: "O" });
+        return dissolved >= 0
+            && (state.Result.Stop == SaddleSolver.Stop.NotConverged
+                || (state.Amount(PhaseKind.Metal) > 0 && state.MoleFraction[dissolved] > MostDissolvedOxygen));
+    }
+
+    /// <summary>Failures of the iteration; null where it converged to a sensible state.</summary>
+    /// <param name="assembly">The case.</param>
+    /// <param name="state">The solution.</param>
+    /// <param name="oxygenOfMetalStated">True where the statement is the oxygen dissolved in the metal.</param>
+    public static SolveOutcome.Failed? After(VesselAssembly assembly, EquilibriumState state, bool oxygenOfMetalStated)
+    {
+        if (state.Result.Stop == SaddleSolver.Stop.Converged && assembly.Family is null && IsOverblown(assembly, state))
+        {
+            return new SolveOutcome.Failed(
+                SolveFailure.OxygenHasNoHome,
+                $"The charge brings more oxygen than liquid {assembly.Solvent} can dissolve, and no slag may form to take up its oxide. Allow a slag, charge less oxygen, or state the oxygen potential.",
+                ["O", assembly.Solvent]);
+        }
+
         switch (state.Result.Stop)
         {
             case SaddleSolver.Stop.Converged:
-                return SulfideWithoutOxide(assembly, state);
+                return oxygenOfMetalStated && !(state.Amount(PhaseKind.Metal) > 0)
+                    ? new SolveOutcome.Failed(
+                        SolveFailure.DissolvedOxygenNotReachable,
+                        $"No metal is left to hold the stated dissolved oxygen: before it holds that much, all {assembly.Solvent} goes to the other phases. State less dissolved oxygen.",
+                        ["O", assembly.Solvent])
+                    : null;
             case SaddleSolver.Stop.PotentialUnbounded:
                 var link = assembly.Assembled.Links[Math.Max(0, state.Result.Culprit)];
                 var tooMuch = state.LinkPotential[Math.Max(0, state.Result.Culprit)] > 0;
@@ -60,30 +95,35 @@ internal static class FailureRules
                         [link]);
             case SaddleSolver.Stop.AmountUnbounded:
                 var phase = assembly.Assembled.Phases[Math.Max(0, state.Result.Culprit)];
+                if (phase != PhaseKind.Gas)
+                {
+                    return new SolveOutcome.Failed(
+                        SolveFailure.OxygenHasNoHome,
+                        $"At the stated oxygen potential the {phase.ToString().ToLowerInvariant()} alone would take up oxygen without limit. State a lower oxygen potential.",
+                        ["O"]);
+                }
+
                 return new SolveOutcome.Failed(
                     SolveFailure.PressureExceeded,
-                    $"The stated oxygen potential would take an unlimited amount of {phase.ToString().ToLowerInvariant()}. State a lower oxygen potential or a higher pressure.",
+                    "The stated oxygen potential would take an unlimited amount of gas. State a lower oxygen potential or a higher pressure.",
                     ["O"]);
             default:
-                return new SolveOutcome.Failed(
-                    SolveFailure.NotConverged, "The iteration did not converge. Please report the case.", []);
+                return HoldsTooMuchSulfur(state)
+                    ? new SolveOutcome.Failed(
+                        SolveFailure.ElementHasNoHome,
+                        "The slag would have to hold more sulfur than a sulfide capacity describes; in practice a matte would form, which the model lacks. Charge less sulfur or allow a gas.",
+                        ["S"])
+                    : new SolveOutcome.Failed(
+                        SolveFailure.NotConverged, "The iteration did not converge. Please report the case.", []);
         }
     }
 
-    /// <summary>
-    /// Sulfur enters a slag in place of oxygen. Where next to no oxide is left, the capacity asks for more sulfur than there is oxygen to
-    /// replace: no slag is that.
-    /// </summary>
-    private static SolveOutcome.Failed? SulfideWithoutOxide(VesselAssembly assembly, EquilibriumState state)
+    /// <summary>True where sulfide has displaced a tenth of the slag or the sulfur pressure is beyond any vessel's.</summary>
+    private static bool HoldsTooMuchSulfur(EquilibriumState state)
     {
-        const double rounding = 1e-9;
-        var oxygen = state.Elements(PhaseKind.Slag)["O"] + assembly.Account.Inert["O"];
-        return oxygen >= -rounding * state.Amount(PhaseKind.Slag)
-            ? null
-            : new SolveOutcome.Failed(
-                SolveFailure.ElementHasNoHome,
-                FormattableString.Invariant(
-                    $"At log10 pO2 = {OxygenPotential.ToLog10(state.LnActivity("O")!.Value):0.##} so little oxide is left that the slag would hold more sulfur than it has oxygen to replace. State a higher oxygen potential, charge less sulfur, or leave the slag out."),
-                ["S"]);
+        const double largestSulfide = 0.1;
+        const double largestLnActivity = 5;
+        var sulfide = Array.FindIndex(state.Assembled.Species, s => s is { Phase: PhaseKind.Slag, Name: "S" });
+        return sulfide >= 0 && (state.MoleFraction[sulfide] > largestSulfide || state.LnActivity("S") > largestLnActivity);
     }
 }

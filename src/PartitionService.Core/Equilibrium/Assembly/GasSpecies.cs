@@ -28,7 +28,8 @@ internal static class GasSpecies
             }
 
             var row = template.Row;
-            var energy = ledger.Override(row.Slot) ?? row.GibbsEnergy(temperatureKelvin);
+            var given = ledger.Override(row.Slot);
+            var energy = given ?? row.GibbsEnergy(temperatureKelvin);
             ledger.Take(row.Slot, row, template.Quantity, energy, "J/mol", row.SigmaJoulePerMol);
             yield return new SpeciesRecord(
                 row.Species,
@@ -38,7 +39,11 @@ internal static class GasSpecies
                 (-energy / (PhysicalConstants.GasConstant * temperatureKelvin)) - lnPressure,
                 null,
                 "",
-                template.Slots);
+                template.Slots)
+            {
+                LnKPerKelvin = -StateConversion.GibbsEnergyOverThermalPerKelvin(
+                    energy, given is null ? row.GibbsEnergyPerKelvin(temperatureKelvin) : 0, temperatureKelvin),
+            };
         }
     }
 

@@ -21,7 +21,7 @@ internal static class MetalSpecies
         var reference = StateConversion.ReferenceName(element.Symbol);
         if (element.Symbol == solvent)
         {
-            return Species(element.Symbol, 0, reference, []);
+            return Species(element.Symbol, 0, 0, reference, []);
         }
 
         var slot = Slot(solvent, element.Symbol);
@@ -29,7 +29,7 @@ internal static class MetalSpecies
         if (ledger.Override(slot) is { } given)
         {
             ledger.Take(slot, row, $"ln gamma0 of {element.Symbol} in liquid {solvent}, {reference}", given, "1", null);
-            return Species(element.Symbol, given, reference, [slot]);
+            return Species(element.Symbol, given, 0, reference, [slot]);
         }
 
         if (row is null
@@ -41,10 +41,12 @@ internal static class MetalSpecies
         var lnGamma = row.LnGamma(temperatureKelvin) + conversion;
         ledger.Take(
             slot, row, $"ln gamma0 of {element.Symbol} in liquid {solvent}, {reference}", lnGamma, "1", row.SigmaLnGamma);
-        return Species(element.Symbol, lnGamma, reference, [slot]);
+        var perKelvin = row.LnGammaPerKelvin(temperatureKelvin)
+            + StateConversion.LnReferenceOverStatePerKelvin(element, row.SoluteState, temperatureKelvin, catalogue);
+        return Species(element.Symbol, lnGamma, perKelvin, reference, [slot]);
     }
 
-    private static SpeciesRecord Species(string element, double lnGamma, string reference, string[] slots) =>
+    private static SpeciesRecord Species(string element, double lnGamma, double lnGammaPerKelvin, string reference, string[] slots) =>
         new(
             element,
             PhaseKind.Metal,
@@ -53,5 +55,8 @@ internal static class MetalSpecies
             -lnGamma,
             lnGamma,
             reference,
-            slots);
+            slots)
+        {
+            LnKPerKelvin = -lnGammaPerKelvin,
+        };
 }

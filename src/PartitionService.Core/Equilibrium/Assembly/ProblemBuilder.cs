@@ -22,7 +22,7 @@ internal sealed class ProblemBuilder(IReadOnlyDictionary<string, double> amounts
         string solvent,
         double[] guess,
         IEnumerable<InteractionIndex.Pair> interactions,
-        Func<InteractionIndex.Pair, double> epsilon)
+        Func<InteractionIndex.Pair, InteractionTerm> epsilon)
     {
         var placed = Placeable(species, phases);
         var unplaced = amounts.Keys.Where(e => !placed.Contains(e)).ToArray();
@@ -43,11 +43,15 @@ internal sealed class ProblemBuilder(IReadOnlyDictionary<string, double> amounts
                 []));
         }
 
+        // A phase that nothing can enter would leave an empty row in the system.
+        guess = [.. guess.Where((_, index) => used.Exists(s => s.Phase == phases[index]))];
+        phases = [.. phases.Where(phase => used.Exists(s => s.Phase == phase))];
         var byElement = used.Where(s => s.Carried is not null).ToLookup(s => s.Carried!, StringComparer.Ordinal);
         var ordered = carried.SelectMany(e => byElement[e].OrderBy(s => s.Atoms[e])).Concat(used.Where(s => s.Carried is null)).ToArray();
         var solutes = Enumerable.Range(0, ordered.Length)
             .Where(s => ordered[s].Phase == PhaseKind.Metal && ordered[s].Name != solvent).ToArray();
         var oxygen = Array.IndexOf(links, "O");
+        var pairs = Pairs(ordered, solutes, interactions, epsilon);
         return new AssembledCase
         {
             Problem = Pack(ordered, carried, links, phases, guess, oxygen),
@@ -58,7 +62,9 @@ internal sealed class ProblemBuilder(IReadOnlyDictionary<string, double> amounts
             OxygenLink = oxygen,
             MetalSolutes = solutes,
             SolventSpecies = Array.FindIndex(ordered, s => s.Phase == PhaseKind.Metal && s.Name == solvent),
-            Interactions = new InteractionModel(Pairs(ordered, solutes, interactions, epsilon)),
+            Interactions = new InteractionModel(
+                [.. pairs.Where(pair => pair.Term.Epsilon != 0).Select(pair => (pair.First, pair.Second, pair.Term.Epsilon))]),
+            InteractionTerms = pairs,
             Unplaced = unplaced,
         };
     }
@@ -148,11 +154,11 @@ internal sealed class ProblemBuilder(IReadOnlyDictionary<string, double> amounts
         };
     }
 
-    private static List<(int First, int Second, double Epsilon)> Pairs(
+    private static List<(int First, int Second, InteractionTerm Term)> Pairs(
         SpeciesRecord[] ordered,
         int[] solutes,
         IEnumerable<InteractionIndex.Pair> interactions,
-        Func<InteractionIndex.Pair, double> epsilon)
+        Func<InteractionIndex.Pair, InteractionTerm> epsilon)
     {
         var index = new Dictionary<string, int>(StringComparer.Ordinal);
         for (var i = 0; i < solutes.Length; i++)
@@ -160,12 +166,12 @@ internal sealed class ProblemBuilder(IReadOnlyDictionary<string, double> amounts
             index[ordered[solutes[i]].Name] = i;
         }
 
-        var pairs = new List<(int First, int Second, double Epsilon)>();
+        var pairs = new List<(int First, int Second, InteractionTerm Term)>();
         foreach (var pair in interactions)
         {
-            if (index.TryGetValue(pair.First, out var i) && index.TryGetValue(pair.Second, out var j) && epsilon(pair) is var value && value != 0)
+            if (index.TryGetValue(pair.First, out var i) && index.TryGetValue(pair.Second, out var j))
             {
-                pairs.Add((i, j, value));
+                pairs.Add((i, j, epsilon(pair)));
             }
         }
 

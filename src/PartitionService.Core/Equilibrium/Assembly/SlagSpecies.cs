@@ -79,7 +79,7 @@ internal sealed class SlagSpecies(
 
         ledger.Take(row.Slot, row, "log10 of the phosphorus partition", 0, "1", row.SigmaLog10);
         Terms.Add(new SlagTerms.Term(SlagTerms.TermKind.Phosphorus, "PO2.5", row.Slot, 0, null));
-        return Species("PO2.5", "P", 2.5, 0, 0, null, "", [row.Slot]);
+        return Species("PO2.5", "P", 2.5, 0, 0, 0, null, "", [row.Slot]);
     }
 
     private SpeciesRecord? Product(Element element, string slot, SlagActivityDatum row)
@@ -89,9 +89,15 @@ internal sealed class SlagSpecies(
             return null;
         }
 
-        var value = ledger.Override(slot) ?? row.LnGamma(temperatureKelvin);
+        var given = ledger.Override(slot);
+        var value = given ?? row.LnGamma(temperatureKelvin);
         ledger.Take(slot, row, $"ln(K/gamma) of {row.Oxide} in {family.Name} slag", value, "1", row.SigmaLnGamma);
-        return Species(row.Oxide, element.Symbol, row.OxygenPerMetal, 0, value - conversion, null, "", [slot]);
+        var perKelvin = (given is null ? row.LnGammaPerKelvin(temperatureKelvin) : 0)
+            - StateConversion.LnReferenceOverStatePerKelvin(element, row.MetalState, temperatureKelvin, catalogue);
+        return Species(row.Oxide, element.Symbol, row.OxygenPerMetal, 0, value - conversion, perKelvin, null, "", [slot]) with
+        {
+            HasProductDatum = true,
+        };
     }
 
     private SpeciesRecord? Chloride(Element element, string slot, SlagActivityDatum row)
@@ -102,7 +108,8 @@ internal sealed class SlagSpecies(
             return null;
         }
 
-        var energy = ledger.Override(chlorideSlot) ?? formation.GibbsEnergy(temperatureKelvin);
+        var given = ledger.Override(chlorideSlot);
+        var energy = given ?? formation.GibbsEnergy(temperatureKelvin);
         ledger.Take(
             chlorideSlot, formation, $"Gibbs energy of formation of {row.Oxide}(l)", energy, "J/mol", formation.SigmaJoulePerMol);
         var lnGamma = LnGamma(slot, row);
@@ -112,6 +119,8 @@ internal sealed class SlagSpecies(
             0,
             row.ChlorinePerMetal,
             (-energy / thermal) - lnGamma,
+            -StateConversion.GibbsEnergyOverThermalPerKelvin(energy, given is null ? formation.GibbsEnergyPerKelvin : 0, temperatureKelvin)
+                - LnGammaPerKelvin(slot, row),
             lnGamma,
             "pure liquid chloride",
             [slot, chlorideSlot]);
@@ -146,8 +155,16 @@ internal sealed class SlagSpecies(
             Terms.Add(new SlagTerms.Term(SlagTerms.TermKind.Slope, oxide, slot, lnK, row));
         }
 
+        var perKelvin = -StateConversion.GibbsEnergyOverThermalPerKelvin(
+            energy, given is null ? oxidation.GibbsEnergyPerKelvin : 0, temperatureKelvin);
+        if (given is null)
+        {
+            perKelvin -= StateConversion.LnReferenceOverStatePerKelvin(element, oxidation.MetalState, temperatureKelvin, catalogue);
+        }
+
+        perKelvin -= row is null ? 0 : LnGammaPerKelvin(slot, row);
         return Species(
-            oxide, element.Symbol, oxidation.OxygenPerMetal, 0, lnK, lnGamma, $"pure {Words(state)} oxide", [slot, oxidationSlot]);
+            oxide, element.Symbol, oxidation.OxygenPerMetal, 0, lnK, perKelvin, lnGamma, $"pure {Words(state)} oxide", [slot, oxidationSlot]);
     }
 
     /// <summary>
@@ -184,12 +201,16 @@ internal sealed class SlagSpecies(
         return value;
     }
 
+    private double LnGammaPerKelvin(string slot, SlagActivityDatum row) =>
+        ledger.Override(slot) is null ? row.LnGammaPerKelvin(temperatureKelvin) : 0;
+
     private static SpeciesRecord Species(
         string name,
         string element,
         double oxygen,
         double chlorine,
         double lnK,
+        double lnKPerKelvin,
         double? lnGamma,
         string standardState,
         string[] slots)
@@ -205,7 +226,10 @@ internal sealed class SlagSpecies(
             atoms["Cl"] = chlorine;
         }
 
-        return new SpeciesRecord(name, PhaseKind.Slag, element, atoms, lnK, lnGamma, standardState, slots);
+        return new SpeciesRecord(name, PhaseKind.Slag, element, atoms, lnK, lnGamma, standardState, slots)
+        {
+            LnKPerKelvin = lnKPerKelvin,
+        };
     }
 
     private static string Words(StandardState state) => state switch

@@ -17,4 +17,11 @@ internal sealed record SpeciesRecord(
     double LnK,
     double? LnGamma,
     string StandardState,
-    IReadOnlyList<string> Slots);
+    IReadOnlyList<string> Slots)
+{
+    /// <summary>Derivative of ln K with respect to temperature at fixed composition, per kelvin; an overridden number does not vary.</summary>
+    public double LnKPerKelvin { get; init; }
+
+    /// <summary>True where the slag datum is ln(K/gamma) itself and so enters ln K with a plus sign.</summary>
+    public bool HasProductDatum { get; init; }
+}

@@ -7,7 +7,8 @@ namespace PartitionService.Core.Equilibrium.Assembly;
 /// <summary>Builds a <see cref="VesselAssembly"/>.</summary>
 /// <param name="vesselCase">A valid case.</param>
 /// <param name="catalogue">The catalogue.</param>
-internal sealed class VesselAssembler(VesselCase vesselCase, ThermochemicalCatalogue catalogue)
+/// <param name="withoutMetal">True to leave the metal out: more oxygen was charged than a metal can live with.</param>
+internal sealed class VesselAssembler(VesselCase vesselCase, ThermochemicalCatalogue catalogue, bool withoutMetal = false)
 {
     private readonly double temperature = vesselCase.TemperatureKelvin;
     private readonly DatumLedger ledger = new(catalogue, vesselCase.Overrides, vesselCase.TemperatureKelvin);
@@ -18,22 +19,36 @@ internal sealed class VesselAssembler(VesselCase vesselCase, ThermochemicalCatal
     {
         var family = vesselCase.SlagFamily is { } name ? catalogue.SlagFamilies[name] : null;
         var index = SlagIndex.For(catalogue);
-        var account = ChargeAccount.Split(
-            vesselCase.Charge.Select(item => ChargeReader.Read(item, catalogue.Elements)),
+        var hasSlagSpecies = new Dictionary<string, bool>(StringComparer.Ordinal);
+        ChargeAccount Split(IEnumerable<ChargeItem> items) => ChargeAccount.Split(
+            items.Select(item => ChargeReader.Read(item, catalogue.Elements)),
             vesselCase.Allowances,
             family is not null,
-            element => family is not null && index.Oxides(family.Name, element, ledger).Any(),
+            HasSlagSpecies,
             index.UsualOxygen);
+        bool HasSlagSpecies(string element)
+        {
+            if (!hasSlagSpecies.TryGetValue(element, out var has))
+            {
+                hasSlagSpecies[element] = has = family is not null && index.Oxides(family.Name, element, ledger).Any();
+            }
+
+            return has;
+        }
+
+        var account = Split(vesselCase.Charge);
         var solvent = SolventSelection.Choose(vesselCase.Solvent, account, catalogue, out failure);
         if (solvent is null)
         {
             return null;
         }
 
+        FixedPotential? potential = null;
         double? fixedOxygen = null;
         if (vesselCase.Oxygen is not (OxygenStatement.Closed or OxygenStatement.Dissolved))
         {
-            fixedOxygen = OxygenStatementReader.Potential(vesselCase.Oxygen, temperature, catalogue, ledger);
+            potential = OxygenStatementReader.Potential(vesselCase.Oxygen, temperature, catalogue, ledger);
+            fixedOxygen = potential?.HalfLnPressure;
         }
         else if (vesselCase.Oxygen is OxygenStatement.Dissolved)
         {
@@ -86,9 +101,15 @@ internal sealed class VesselAssembler(VesselCase vesselCase, ThermochemicalCatal
         }
 
         var metalExcluded = ExcludeMetal(species, fixedOxygen, family is not null, out failure);
+        if (withoutMetal)
+        {
+            species.RemoveAll(s => s.Phase == PhaseKind.Metal);
+            metalExcluded = true;
+        }
+
         return failure is not null
             ? null
-            : Build(account, species, solvent, family, slag?.Terms, fixedOxygen, metalExcluded, present);
+            : Build(account, species, solvent, family, slag?.Terms, fixedOxygen, potential, metalExcluded, present, Split);
     }
 
     private VesselAssembly Build(
@@ -98,8 +119,10 @@ internal sealed class VesselAssembler(VesselCase vesselCase, ThermochemicalCatal
         SlagFamily? family,
         SlagTerms? terms,
         double? fixedOxygen,
+        FixedPotential? potential,
         bool metalExcluded,
-        HashSet<string> present)
+        HashSet<string> present,
+        Func<IEnumerable<ChargeItem>, ChargeAccount> split)
     {
         var phases = new List<PhaseKind>();
         if (!metalExcluded)
@@ -137,16 +160,19 @@ internal sealed class VesselAssembler(VesselCase vesselCase, ThermochemicalCatal
             Family = family,
             Terms = terms,
             FixedOxygen = fixedOxygen,
+            Potential = potential,
+            Split = item => split([item]),
             MetalExcluded = metalExcluded,
         };
 
-        double Epsilon(InteractionIndex.Pair pair)
+        InteractionTerm Epsilon(InteractionIndex.Pair pair)
         {
             var row = ledger.Select<InteractionDatum>(pair.Slot);
-            var value = ledger.Override(pair.Slot) ?? row!.Epsilon(temperature);
+            var given = ledger.Override(pair.Slot);
+            var value = given ?? row!.Epsilon(temperature);
             ledger.Take(
                 pair.Slot, row, $"epsilon of {pair.First} and {pair.Second} in liquid {solvent}", value, "1", row?.SigmaEpsilon);
-            return value;
+            return new InteractionTerm(pair.Slot, value, given is null ? row!.EpsilonPerKelvin(temperature) : 0);
         }
     }
 

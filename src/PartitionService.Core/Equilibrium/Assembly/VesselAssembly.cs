@@ -26,6 +26,12 @@ internal sealed class VesselAssembly
     /// <summary>1/2 ln pO2 where the statement fixes it at once.</summary>
     public required double? FixedOxygen { get; init; }
 
+    /// <summary>What the fixed potential depends on; null with a closed balance and with dissolved oxygen.</summary>
+    public required FixedPotential? Potential { get; init; }
+
+    /// <summary>Splits one more charge item as the charge itself was split.</summary>
+    public required Func<ChargeItem, ChargeAccount> Split { get; init; }
+
     /// <summary>True where the stated oxygen potential leaves no room for a metal.</summary>
     public required bool MetalExcluded { get; init; }
 }

@@ -68,19 +68,28 @@ internal sealed class AnswerBuilder(
 
         foreach (var symbol in symbols.Order(StringComparer.Ordinal))
         {
-            var input = assembly.Account.Input[symbol] + (symbol == "O" ? streams.Supply : 0);
+            var supply = symbol == "O" ? streams.Supply : 0;
+            var input = assembly.Account.Input[symbol] + supply;
             var shares = new[]
             {
                 streams.Metal[symbol], streams.Slag[symbol], streams.Gas[symbol], streams.Dust[symbol], streams.Carbon[symbol],
                 streams.Unplaced[symbol],
             };
             var output = shares.Sum();
-            if (!(input > 0) && !(output > 0))
+            if (input == 0 && output == 0)
             {
                 continue;
             }
 
-            largestError = Math.Max(largestError, Math.Abs(output - input) / Math.Max(input, output));
+            // Where nearly all oxygen is removed, what is left is a small difference: the error is relative to what was moved.
+            largestError = Math.Max(
+                largestError, Math.Abs(output - input) / Math.Max(Math.Max(input, output), Math.Abs(supply)));
+            input = supply == 0 ? input : output;
+            if (!(output > 0))
+            {
+                continue;
+            }
+
             var inMetal = streams.EquilibriumMetal[symbol];
             var inSlag = streams.EquilibriumSlag[symbol];
             rows.Add(new ElementDistribution

@@ -50,13 +50,15 @@ internal static class CompositionRemarks
         var fractions = assembled.MetalSolutes.Select(s => Math.Min(1, context.State.MoleFraction[s])).ToArray();
         foreach (var (first, second, strength) in assembled.Interactions.BoundedPairs(fractions))
         {
-            var names = (assembled.Species[assembled.MetalSolutes[first]].Name, assembled.Species[assembled.MetalSolutes[second]].Name);
+            // Slots hold the names in ordinal order.
+            string[] names = [assembled.Species[assembled.MetalSolutes[first]].Name, assembled.Species[assembled.MetalSolutes[second]].Name];
+            Array.Sort(names, StringComparer.Ordinal);
             yield return new Remark(
                 RemarkCode.InteractionBounded,
                 Severity.Note,
-                names.Item1,
-                $"interaction/{context.Assembly.Solvent}/{names.Item1}/{names.Item2}",
-                $"The interaction of {names.Item1} and {names.Item2} is beyond the range of a first-order parameter (|epsilon x| = {RemarkRules.Short(strength)}); it was bounded.",
+                names[0],
+                $"interaction/{context.Assembly.Solvent}/{names[0]}/{names[1]}",
+                $"The interaction of {names[0]} and {names[1]} is beyond the range of a first-order parameter (|epsilon x| = {RemarkRules.Short(strength)}); it was bounded.",
                 [new RemarkNumber("epsilon_times_x", strength, "1")]);
         }
     }

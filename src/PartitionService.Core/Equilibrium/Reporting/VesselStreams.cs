@@ -18,6 +18,9 @@ internal sealed class VesselStreams
         EquilibriumMetal = state.Elements(PhaseKind.Metal);
         EquilibriumSlag = state.Elements(PhaseKind.Slag);
         AddAll(EquilibriumSlag, account.Inert, 1);
+
+        // Where sulfide takes nearly all oxide ions, rounding may leave less than none.
+        EquilibriumSlag.Add("O", Math.Max(0, -EquilibriumSlag["O"]));
         Gas = state.Elements(PhaseKind.Gas);
         Carbon = state.Elements(PhaseKind.Carbon);
         Dust = account.Dust;

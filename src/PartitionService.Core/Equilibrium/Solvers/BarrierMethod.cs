@@ -11,6 +11,12 @@ internal static class BarrierMethod
 {
     private const int Stride = SolverWorkspace.MaximumBorder;
 
+    /// <summary>Factor from one mu to the next.</summary>
+    private const double BarrierFactor = 0.03;
+
+    /// <summary>Share of all atoms below which the barrier decides nothing any more.</summary>
+    private const double NearEnough = 1e-8;
+
     /// <summary>Why the method ended.</summary>
     public enum Stop
     {
@@ -46,9 +52,19 @@ internal static class BarrierMethod
         }
 
         ReducedSystem.SetReferences(problem, work);
-        for (var mu = 0.1 * total; mu > 1e-16 * total; mu *= 0.03)
+        Span<double> before = stackalloc double[EquilibriumProblem.MaximumPhases];
+        Span<double> after = stackalloc double[EquilibriumProblem.MaximumPhases];
+        for (var mu = 0.1 * total; mu > 1e-16 * total; mu *= BarrierFactor)
         {
+            after.CopyTo(before);
+            work.PhaseAmount.CopyTo(after);
             var stop = MinimiseAmounts(problem, work, mu, 1e12 * total, out culprit, ref iterations, cancellation);
+            if (stop == Stop.Stalled && mu < NearEnough * total)
+            {
+                // Rounding of the sums ends the path; Newton's method takes it from here.
+                break;
+            }
+
             if (stop != Stop.Converged)
             {
                 return stop;
@@ -57,8 +73,8 @@ internal static class BarrierMethod
 
         for (var phase = 0; phase < problem.PhaseCount; phase++)
         {
-            // At the end N (1 - sum x) = mu: a phase with a clear deficit is absent.
-            if (1 - work.PhaseSum[phase] > 1e-4)
+            // On the path N (1 - sum x) = mu: of a phase that is absent the amount follows mu, of one that is present the deficit does.
+            if (after[phase] < 3 * BarrierFactor * before[phase])
             {
                 work.Present[phase] = false;
                 work.PhaseAmount[phase] = 0;

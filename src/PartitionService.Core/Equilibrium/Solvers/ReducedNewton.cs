@@ -11,6 +11,12 @@ internal static class ReducedNewton
     private const double LargestPotentialStep = 2.5;
     private const double LargestAmountStep = 2.5;
 
+    /// <summary>
+    /// Relative addition to the diagonal of the amounts. With fewer components than phases (one metal under slag and gas at a fixed
+    /// oxygen potential) the amounts' block is singular; this much above rounding makes the step shrink the phases whose sum is below 1.
+    /// </summary>
+    private const double PhaseRegularisation = 1e-12;
+
     /// <summary>Iterates from the state of <paramref name="work"/>.</summary>
     /// <param name="problem">The problem.</param>
     /// <param name="work">State and buffers; references must be set.</param>
@@ -19,12 +25,11 @@ internal static class ReducedNewton
     /// <returns>True where every stopping rule is met.</returns>
     public static bool TrySolve(EquilibriumProblem problem, SolverWorkspace work, ref int iterations, CancellationToken cancellation)
     {
-        Span<bool> required = stackalloc bool[EquilibriumProblem.MaximumPhases];
-        FindRequired(problem, required);
         Span<int> shrinking = stackalloc int[EquilibriumProblem.MaximumPhases];
         Span<int> formed = stackalloc int[EquilibriumProblem.MaximumPhases];
         shrinking.Clear();
         formed.Clear();
+        StrandedComponents.Rescue(problem, work);
         var lastStep = double.PositiveInfinity;
         for (var step = 0; step < Convergence.NewtonLimit; step++)
         {
@@ -57,7 +62,7 @@ internal static class ReducedNewton
                 return false;
             }
 
-            lastStep = Move(problem, work, size, required, shrinking);
+            lastStep = Move(problem, work, size, shrinking);
             if (!double.IsFinite(lastStep))
             {
                 return false;
@@ -88,40 +93,6 @@ internal static class ReducedNewton
         }
 
         return residual;
-    }
-
-    /// <summary>Phases that alone can hold some component: they cannot vanish.</summary>
-    private static void FindRequired(EquilibriumProblem problem, Span<bool> required)
-    {
-        required.Clear();
-        for (var element = 0; element < problem.ElementCount; element++)
-        {
-            var first = problem.Phase[problem.GroupStart[element]];
-            var single = true;
-            for (var s = problem.GroupStart[element] + 1; s < problem.GroupStart[element + 1]; s++)
-            {
-                single &= problem.Phase[s] == first;
-            }
-
-            required[first] |= single;
-        }
-
-        for (var j = 0; j < problem.LinkCount; j++)
-        {
-            var only = -1;
-            for (var s = 0; s < problem.SpeciesCount && !problem.LinkFixed[j]; s++)
-            {
-                if (problem.LinkAtoms[j][s] > 0)
-                {
-                    only = only < 0 || only == problem.Phase[s] ? problem.Phase[s] : EquilibriumProblem.MaximumPhases;
-                }
-            }
-
-            if (only >= 0 && only < EquilibriumProblem.MaximumPhases)
-            {
-                required[only] = true;
-            }
-        }
     }
 
     private static bool FormMissingPhase(EquilibriumProblem problem, SolverWorkspace work, Span<int> formed)
@@ -175,6 +146,11 @@ internal static class ReducedNewton
                 work.Matrix[(row * Stride) + column] = work.Hessian[(border * Stride) + work.Unknown[column]];
             }
 
+            if (border >= problem.LinkCount)
+            {
+                work.Matrix[(row * Stride) + row] *= 1 + PhaseRegularisation;
+            }
+
             work.Step[row] = RightSide(problem, work, border);
         }
 
@@ -201,7 +177,7 @@ internal static class ReducedNewton
     }
 
     private static double Move(
-        EquilibriumProblem problem, SolverWorkspace work, int size, ReadOnlySpan<bool> required, Span<int> shrinking)
+        EquilibriumProblem problem, SolverWorkspace work, int size, Span<int> shrinking)
     {
         var scale = 1.0;
         for (var row = 0; row < size; row++)
@@ -230,7 +206,7 @@ internal static class ReducedNewton
             var next = amount * Math.Exp(exponent);
             largest = Math.Max(largest, Math.Abs(exponent));
             shrinking[phase] = exponent <= -LargestAmountStep && work.PhaseSum[phase] < 1 ? shrinking[phase] + 1 : 0;
-            if (shrinking[phase] >= 2 && !required[phase])
+            if (shrinking[phase] >= 2 && !IsOnly(problem, work, phase) && !StrandedComponents.WouldStrand(problem, work, phase))
             {
                 work.Present[phase] = false;
                 next = 0;
@@ -240,5 +216,19 @@ internal static class ReducedNewton
         }
 
         return largest;
+    }
+
+    /// <summary>True where no other phase is present: something has to hold the elements.</summary>
+    private static bool IsOnly(EquilibriumProblem problem, SolverWorkspace work, int phase)
+    {
+        for (var other = 0; other < problem.PhaseCount; other++)
+        {
+            if (other != phase && work.Present[other])
+            {
+                return false;
+            }
+        }
+
+        return true;
     }
 }
