@@ -1,4 +1,5 @@
 using System.Diagnostics;
+using Grpc.Core;
 using PartitionService.HostileInput.Running;
 using Xunit.Abstractions;
 
@@ -25,6 +26,7 @@ public sealed class ServiceFuzzTests(ITestOutputHelper log)
 
         log.WriteLine($"{Stages * perStage} messages in {clock.Elapsed.TotalSeconds:0.0} s; {run.Summary}; heap {string.Join(", ", heap.Heaps)}");
         Assert.True(run.Faults.Count == 0, $"{run.Faults.Count} faults\n{run.Report}");
+        Assert.True(run.Codes.GetValueOrDefault(StatusCode.OK) > perStage / 2, $"too few answers to say much: {run.Summary}");
         heap.AssertNoGrowth();
     }
 }
