@@ -113,10 +113,20 @@ internal static class FailureRules
                         SolveFailure.ElementHasNoHome,
                         "The slag would have to hold more sulfur than a sulfide capacity describes; in practice a matte would form, which the model lacks. Charge less sulfur or allow a gas.",
                         ["S"])
-                    : new SolveOutcome.Failed(
-                        SolveFailure.NotConverged, "The iteration did not converge. Please report the case.", []);
+                    : NotConverged(assembly, oxygenOfMetalStated);
         }
     }
+
+    /// <summary>
+    /// A stated oxygen content of the metal is sought, not set: a metal that its own oxygen consumes leaves the search without an end, which
+    /// is a matter of the statement and not of the service.
+    /// </summary>
+    private static SolveOutcome.Failed NotConverged(VesselAssembly assembly, bool oxygenOfMetalStated) => oxygenOfMetalStated
+        ? new SolveOutcome.Failed(
+            SolveFailure.DissolvedOxygenNotReachable,
+            $"The search for a state in which liquid {assembly.Solvent} holds the stated dissolved oxygen came to no end. State another content, or the oxygen in another way.",
+            ["O", assembly.Solvent])
+        : new SolveOutcome.Failed(SolveFailure.NotConverged, "The iteration did not converge. Please report the case.", []);
 
     /// <summary>True where sulfide has displaced a tenth of the slag or the sulfur pressure is beyond any vessel's.</summary>
     private static bool HoldsTooMuchSulfur(EquilibriumState state)
