@@ -1,8 +1,9 @@
 """A client that knows nothing of this repository but the committed descriptor set.
 
 Refusals carry their details in one header of up to 40 KiB, 54 KiB on the wire. gRPC on the C core accepts 8 KiB of headers unless told
-otherwise (newer releases 16 KiB) and turns a larger refusal into RESOURCE_EXHAUSTED without details. A client on the C core should set
-grpc.max_metadata_size to 65536, as this one does; with a handful of violations the default suffices.
+otherwise (newer releases 16 KiB) and turns a larger refusal into RESOURCE_EXHAUSTED, "received initial metadata size exceeds limit", so
+that even the status is lost. Measured with version 1.51: 50 violations of a mass arrive with the default, 60 do not. A client on the C core
+should set grpc.max_metadata_size to 65536, as this one does.
 """
 
 import json

@@ -25,6 +25,7 @@ public static class SeedMessages
         "ListSolutes" => new ListSolutesRequest { Solvent = "Cu", TemperatureKelvin = 1500, PageSize = 10 },
         "ListSlagFamilies" => new ListSlagFamiliesRequest { PageSize = 2 },
         "ListData" => new ListDataRequest { SlotPrefix = "metal/", Element = "Pb", IncludeCompeting = true, PageSize = 5 },
+        "GetCoverage" => new GetCoverageRequest { Kind = CoverageKind.Slags },
         "ExplainDatum" => new ExplainDatumRequest { Slot = Vocabulary.Slot(dice), TemperatureKelvin = 1573 },
         "ConvertActivityCoefficient" => new ConvertActivityCoefficientRequest
         {

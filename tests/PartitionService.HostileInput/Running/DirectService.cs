@@ -73,6 +73,7 @@ internal sealed class DirectService : IDisposable
         ListSolutesRequest sent => ThroughAsync(method, sent, catalogueService.ListSolutes),
         ListSlagFamiliesRequest sent => ThroughAsync(method, sent, catalogueService.ListSlagFamilies),
         ListDataRequest sent => ThroughAsync(method, sent, catalogueService.ListData),
+        GetCoverageRequest sent => ThroughAsync(method, sent, catalogueService.GetCoverage),
         ExplainDatumRequest sent => ThroughAsync(method, sent, catalogueService.ExplainDatum),
         ConvertActivityCoefficientRequest sent => ThroughAsync(method, sent, activity.ConvertActivityCoefficient),
         _ => throw new ArgumentOutOfRangeException(nameof(method), method, "no such method here yet"),

@@ -22,6 +22,10 @@ internal sealed class FuzzRun(int seed, IReadOnlyList<string> tokens, Func<Hosti
     private readonly ConcurrentBag<string> faults = [];
     private readonly ConcurrentDictionary<int, long> running = new();
     private long slowest;
+    private int endlessSearches;
+
+    /// <summary>How many searches for a stated oxygen content of the metal came to no end; a solver that gets worse shows here.</summary>
+    public int EndlessSearches => endlessSearches;
 
     /// <summary>How many replies of each code came.</summary>
     public IReadOnlyDictionary<StatusCode, int> Codes => codes;
@@ -70,6 +74,8 @@ internal sealed class FuzzRun(int seed, IReadOnlyList<string> tokens, Func<Hosti
             var reply = await call(request);
             codes.AddOrUpdate(reply?.Code ?? StatusCode.InvalidArgument, 1, (_, before) => before + 1);
             fault = reply is null ? null : FindFault(reply, request);
+            if (reply?.Refusal?.Message.Contains("came to no end", StringComparison.Ordinal) == true)
+                Interlocked.Increment(ref endlessSearches);
         }
         catch (Exception exception)
         {

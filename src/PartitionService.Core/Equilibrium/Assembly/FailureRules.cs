@@ -1,5 +1,4 @@
 using PartitionService.Core.Equilibrium.Solvers;
-using PartitionService.Core.Thermodynamics;
 
 namespace PartitionService.Core.Equilibrium.Assembly;
 
@@ -79,7 +78,7 @@ internal static class FailureRules
                         SolveFailure.DissolvedOxygenNotReachable,
                         $"No metal is left to hold the stated dissolved oxygen: before it holds that much, all {assembly.Solvent} goes to the other phases. State less dissolved oxygen.",
                         ["O", assembly.Solvent])
-                    : SulfideWithoutOxide(assembly, state);
+                    : null;
             case SaddleSolver.Stop.PotentialUnbounded:
                 var link = assembly.Assembled.Links[Math.Max(0, state.Result.Culprit)];
                 var tooMuch = state.LinkPotential[Math.Max(0, state.Result.Culprit)] > 0;
@@ -114,10 +113,20 @@ internal static class FailureRules
                         SolveFailure.ElementHasNoHome,
                         "The slag would have to hold more sulfur than a sulfide capacity describes; in practice a matte would form, which the model lacks. Charge less sulfur or allow a gas.",
                         ["S"])
-                    : new SolveOutcome.Failed(
-                        SolveFailure.NotConverged, "The iteration did not converge. Please report the case.", []);
+                    : NotConverged(assembly, oxygenOfMetalStated);
         }
     }
+
+    /// <summary>
+    /// A stated oxygen content of the metal is sought, not set: a metal that its own oxygen consumes leaves the search without an end, which
+    /// is a matter of the statement and not of the service.
+    /// </summary>
+    private static SolveOutcome.Failed NotConverged(VesselAssembly assembly, bool oxygenOfMetalStated) => oxygenOfMetalStated
+        ? new SolveOutcome.Failed(
+            SolveFailure.DissolvedOxygenNotReachable,
+            $"The search for a state in which liquid {assembly.Solvent} holds the stated dissolved oxygen came to no end. State another content, or the oxygen in another way.",
+            ["O", assembly.Solvent])
+        : new SolveOutcome.Failed(SolveFailure.NotConverged, "The iteration did not converge. Please report the case.", []);
 
     /// <summary>True where sulfide has displaced a tenth of the slag or the sulfur pressure is beyond any vessel's.</summary>
     private static bool HoldsTooMuchSulfur(EquilibriumState state)
@@ -126,22 +135,5 @@ internal static class FailureRules
         const double largestLnActivity = 5;
         var sulfide = Array.FindIndex(state.Assembled.Species, s => s is { Phase: PhaseKind.Slag, Name: "S" });
         return sulfide >= 0 && (state.MoleFraction[sulfide] > largestSulfide || state.LnActivity("S") > largestLnActivity);
-    }
-
-    /// <summary>
-    /// Sulfur enters a slag in place of oxygen. Where next to no oxide is left, the capacity asks for more sulfur than there is oxygen to
-    /// replace: no slag is that.
-    /// </summary>
-    private static SolveOutcome.Failed? SulfideWithoutOxide(VesselAssembly assembly, EquilibriumState state)
-    {
-        const double rounding = 1e-9;
-        var oxygen = state.Elements(PhaseKind.Slag)["O"] + assembly.Account.Inert["O"];
-        return oxygen >= -rounding * state.Amount(PhaseKind.Slag)
-            ? null
-            : new SolveOutcome.Failed(
-                SolveFailure.ElementHasNoHome,
-                FormattableString.Invariant(
-                    $"At log10 pO2 = {OxygenPotential.ToLog10(state.LnActivity("O")!.Value):0.##} so little oxide is left that the slag would hold more sulfur than it has oxygen to replace. State a higher oxygen potential, charge less sulfur, or leave the slag out."),
-                ["S"]);
     }
 }
