@@ -82,8 +82,8 @@ internal sealed class AnswerBuilder(
             }
 
             // Where nearly all oxygen is removed, what is left is a small difference: the error is relative to what was moved.
-            // Sulfide takes the place of oxide ions, so the oxygen of the slag is a difference of two amounts of that size.
-            var exchanged = symbol == "O" ? streams.EquilibriumSlag["S"] : 0;
+            // Sulfide takes the place of oxide ions, so the oxygen of a slag with sulfur is a difference of amounts of the slag's size.
+            var exchanged = symbol == "O" && streams.EquilibriumSlag["S"] > 0 ? state.Amount(PhaseKind.Slag) : 0;
             largestError = Math.Max(
                 largestError, Math.Abs(output - input) / Math.Max(Math.Max(input, output), Math.Abs(supply) + exchanged));
             input = supply == 0 ? input : output;
