@@ -7,9 +7,29 @@ internal sealed class SlagConstants(string family, Rows rows)
 {
     private static readonly Dictionary<string, string> Whole = new(StringComparer.Ordinal)
     {
-        ["Al"] = "Al2O3", ["As"] = "As2O3", ["B"] = "B2O3", ["Ba"] = "BaO", ["Bi"] = "Bi2O3", ["Ca"] = "CaO", ["Cr"] = "Cr2O3",
-        ["Cu"] = "Cu2O", ["Fe"] = "FeO", ["K"] = "K2O", ["Li"] = "Li2O", ["Mg"] = "MgO", ["Mn"] = "MnO", ["Na"] = "Na2O", ["Ni"] = "NiO",
-        ["P"] = "P2O5", ["Pb"] = "PbO", ["Sb"] = "Sb2O3", ["Si"] = "SiO2", ["Sn"] = "SnO2", ["Sr"] = "SrO", ["Ti"] = "TiO2", ["Zn"] = "ZnO",
+        ["Al"] = "Al2O3",
+        ["As"] = "As2O3",
+        ["B"] = "B2O3",
+        ["Ba"] = "BaO",
+        ["Bi"] = "Bi2O3",
+        ["Ca"] = "CaO",
+        ["Cr"] = "Cr2O3",
+        ["Cu"] = "Cu2O",
+        ["Fe"] = "FeO",
+        ["K"] = "K2O",
+        ["Li"] = "Li2O",
+        ["Mg"] = "MgO",
+        ["Mn"] = "MnO",
+        ["Na"] = "Na2O",
+        ["Ni"] = "NiO",
+        ["P"] = "P2O5",
+        ["Pb"] = "PbO",
+        ["Sb"] = "Sb2O3",
+        ["Si"] = "SiO2",
+        ["Sn"] = "SnO2",
+        ["Sr"] = "SrO",
+        ["Ti"] = "TiO2",
+        ["Zn"] = "ZnO",
     };
 
     private readonly SlagFamily window = rows.Catalogue.SlagFamilies[family];

@@ -85,7 +85,7 @@ public sealed class EquilibriumGrpcServiceTests
         var mass = error.Violation("vessel_case.charge[1].mass_kg");
         Assert.Equal("NOT_ALLOWED", mass.Reason);
         Assert.Contains("-1", mass.Description, StringComparison.Ordinal);
-        Assert.Contains("[0, ", mass.Description, StringComparison.Ordinal);
+        Assert.Contains("[1E-27, ", mass.Description, StringComparison.Ordinal);
         Assert.Contains("NaN", error.Violation("vessel_case.temperature_kelvin").Description, StringComparison.Ordinal);
     }
 

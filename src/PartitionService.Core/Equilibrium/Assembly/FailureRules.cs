@@ -1,4 +1,5 @@
 using PartitionService.Core.Equilibrium.Solvers;
+using PartitionService.Core.Thermodynamics;
 
 namespace PartitionService.Core.Equilibrium.Assembly;
 
@@ -78,7 +79,7 @@ internal static class FailureRules
                         SolveFailure.DissolvedOxygenNotReachable,
                         $"No metal is left to hold the stated dissolved oxygen: before it holds that much, all {assembly.Solvent} goes to the other phases. State less dissolved oxygen.",
                         ["O", assembly.Solvent])
-                    : null;
+                    : SulfideWithoutOxide(assembly, state);
             case SaddleSolver.Stop.PotentialUnbounded:
                 var link = assembly.Assembled.Links[Math.Max(0, state.Result.Culprit)];
                 var tooMuch = state.LinkPotential[Math.Max(0, state.Result.Culprit)] > 0;
@@ -127,6 +128,23 @@ internal static class FailureRules
             $"The search for a state in which liquid {assembly.Solvent} holds the stated dissolved oxygen came to no end. State another content, or the oxygen in another way.",
             ["O", assembly.Solvent])
         : new SolveOutcome.Failed(SolveFailure.NotConverged, "The iteration did not converge. Please report the case.", []);
+
+    /// <summary>
+    /// Sulfur enters a slag in place of oxygen. Where next to no oxide is left, the capacity asks for more sulfur than there is oxygen to
+    /// replace: no slag is that.
+    /// </summary>
+    private static SolveOutcome.Failed? SulfideWithoutOxide(VesselAssembly assembly, EquilibriumState state)
+    {
+        const double rounding = 1e-9;
+        var oxygen = state.Elements(PhaseKind.Slag)["O"] + assembly.Account.Inert["O"];
+        return oxygen >= -rounding * state.Amount(PhaseKind.Slag)
+            ? null
+            : new SolveOutcome.Failed(
+                SolveFailure.ElementHasNoHome,
+                FormattableString.Invariant(
+                    $"At log10 pO2 = {OxygenPotential.ToLog10(state.LnActivity("O")!.Value):0.##} so little oxide is left that the slag would hold more sulfur than it has oxygen to replace. State a higher oxygen potential, charge less sulfur, or leave the slag out."),
+                ["S"]);
+    }
 
     /// <summary>True where sulfide has displaced a tenth of the slag or the sulfur pressure is beyond any vessel's.</summary>
     private static bool HoldsTooMuchSulfur(EquilibriumState state)
